@@ -1,0 +1,11 @@
+package org.mastwright.assess;
+
+import java.util.List;
+import org.mastwright.working.Step;
+
+/** A heading, a sentence and the steps of a calculation. */
+public record Derivation(String heading, String words, List<Step> steps) {
+  public Derivation {
+    steps = List.copyOf(steps);
+  }
+}

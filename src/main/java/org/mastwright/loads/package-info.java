@@ -1,0 +1,2 @@
+/** Load cases of each basis: wind, rotor, weight, ice and pretension, factors, directions. */
+package org.mastwright.loads;

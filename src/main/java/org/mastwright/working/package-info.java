@@ -1,0 +1,2 @@
+/** A number with its formula and source: clause, formula, step, check, finding. */
+package org.mastwright.working;
