@@ -6,6 +6,7 @@ import java.util.Optional;
 import org.mastwright.design.Design;
 import org.mastwright.working.Check;
 import org.mastwright.working.DefaultTaken;
+import org.mastwright.working.Derivation;
 import org.mastwright.working.Finding;
 import org.mastwright.working.Outcome;
 

@@ -1,7 +1,6 @@
-package org.mastwright.assess;
+package org.mastwright.working;
 
 import java.util.List;
-import org.mastwright.working.Step;
 
 /** A heading, a sentence and the steps of a calculation. */
 public record Derivation(String heading, String words, List<Step> steps) {
