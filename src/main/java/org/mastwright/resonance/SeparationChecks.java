@@ -100,7 +100,7 @@ public final class SeparationChecks {
             .filter(m -> m.blocks(uprightRotor))
             .map(m -> nearest(m, excitation, dwelling))
             .flatMap(Optional::stream)
-            .min(Comparator.comparingDouble(n -> n.gap_Hz / n.frequency_Hz))
+            .min(Comparator.comparingDouble(Nearest::share))
             .ifPresent(n -> checks.add(check(n, excitation, marginRatio, findings)));
       }
     }
@@ -108,7 +108,12 @@ public final class SeparationChecks {
   }
 
   /** A mode's edge and the rotor speed nearest to it; the gap is zero inside the band. */
-  private record Nearest(ModeBand mode, double frequency_Hz, double omega_radps, double gap_Hz) {}
+  private record Nearest(ModeBand mode, double frequency_Hz, double omega_radps, double gap_Hz) {
+    /** What decides: the gap as a share of the frequency, since the margin is one too. */
+    double share() {
+      return gap_Hz / frequency_Hz;
+    }
+  }
 
   private static Optional<Nearest> nearest(
       ModeBand mode, Excitation excitation, List<Band> dwelling) {
@@ -126,7 +131,7 @@ public final class SeparationChecks {
         double met_Hz = Math.max(from_Hz, mode.least_Hz());
         here = new Nearest(mode, met_Hz, 2 * Math.PI * met_Hz / excitation.order(), 0);
       }
-      if (best == null || here.gap_Hz < best.gap_Hz) {
+      if (best == null || here.share() < best.share()) {
         best = here;
       }
     }
