@@ -282,6 +282,11 @@ public final class Catenary {
     return stiffness;
   }
 
+  /** Level part of the tension: the same all along where the loads are weight only. */
+  public double levelPull_N() {
+    return Math.hypot(upper_N[0], upper_N[1]);
+  }
+
   public double lowerTension_N() {
     return norm(lower_N);
   }
