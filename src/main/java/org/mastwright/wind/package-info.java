@@ -1,0 +1,2 @@
+/** Air density, design wind speeds and their conversions. */
+package org.mastwright.wind;
