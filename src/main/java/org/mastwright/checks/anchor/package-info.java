@@ -1,0 +1,2 @@
+/** Checks of one kind, each from section forces and design alone. */
+package org.mastwright.checks.anchor;
