@@ -1,0 +1,2 @@
+/** The tower file: read, told where it is wrong, bound to a design; results.json and tables. */
+package org.mastwright.file;
