@@ -282,6 +282,11 @@ public final class Catenary {
     return stiffness;
   }
 
+  /** Mean stiffness of the upper end against level movement. */
+  public double levelStiffness_Npm() {
+    return (stiffness[0] + stiffness[4]) / 2;
+  }
+
   /** Level part of the tension: the same all along where the loads are weight only. */
   public double levelPull_N() {
     return Math.hypot(upper_N[0], upper_N[1]);

@@ -25,6 +25,7 @@ final class Pretension {
   private static final double UNEVEN_FRACTION = 0.10;
   private static final int MOST_ROUNDS = 60;
   private static final double PLUMB_M = 1e-7;
+  private static final double RELAXATION = 0.8;
 
   private final Chain bare;
   private final GuyPlaces guys;
@@ -182,7 +183,7 @@ final class Pretension {
                 + ". Likely: too little tension, or the mast cannot carry its own weight.",
             lost);
       }
-      double off = correct(now, ends, wanted);
+      double off = correct(now, ends, wanted, lengths);
       last = Optional.of(now);
       if (off < PLUMB_M) {
         return lengths;
@@ -198,7 +199,7 @@ final class Pretension {
    * Takes the lean found into the level forces wanted and the settling into the attachments;
    * returns the greatest lean.
    */
-  private double correct(Equilibrium now, Chain.Point[] ends, double[][] wanted) {
+  private double correct(Equilibrium now, Chain.Point[] ends, double[][] wanted, double[] lengths) {
     double off = 0;
     for (int i = 0; i < ends.length; i++) {
       GuyPlaces.Place g = guys.all().get(i);
@@ -208,7 +209,7 @@ final class Pretension {
       Chain.Point place = now.place_m(g.node());
       off = Math.max(off, Math.abs(ends[i].z_m() - place.z_m() - turned.z_m()));
       ends[i] = new Chain.Point(turned.x_m(), turned.y_m(), place.z_m() + turned.z_m());
-      double stiffness = levelStiffness(g.node(), ends);
+      double stiffness = RELAXATION * levelStiffness(g.node(), ends, lengths);
       wanted[i][0] -= stiffness * moved.x_m();
       wanted[i][1] -= stiffness * moved.y_m();
     }
@@ -216,18 +217,21 @@ final class Pretension {
   }
 
   /** About what the guys of a level resist a level movement with. */
-  private double levelStiffness(int node, Chain.Point[] ends) {
+  private double levelStiffness(int node, Chain.Point[] ends, double[] lengths) {
     double sum = 0;
     for (int i = 0; i < ends.length; i++) {
       GuyPlaces.Place g = guys.all().get(i);
       if (g.node() == node) {
-        Chain.Point s = span(g, ends[i]);
-        double level = Math.hypot(s.x_m(), s.y_m());
-        double chord = Math.hypot(level, s.z_m());
-        sum += g.axial_N() * level * level / (chord * chord * chord) / 2;
+        sum +=
+            Catenary.between(
+                    span(g, ends[i]),
+                    g.axial_N(),
+                    lengths[i],
+                    GuyPlaces.ownWeight(g.set(), bare.gravity_mps2()))
+                .levelStiffness_Npm();
       }
     }
-    return sum / 2;
+    return sum;
   }
 
   /** Tensions of each level whose level resultant is what is wanted, changed least. */

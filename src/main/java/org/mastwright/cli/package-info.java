@@ -1,0 +1,2 @@
+/** Commands, exit codes, progress. */
+package org.mastwright.cli;

@@ -1,0 +1,2 @@
+/** Assessment to drawings, HTML and PDF. It prints; it calculates nothing. */
+package org.mastwright.report;
