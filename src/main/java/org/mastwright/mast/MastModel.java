@@ -35,6 +35,13 @@ public final class MastModel {
 
   private static final double LIMIT_TOLERANCE = 0.01;
 
+  /** Where a case has no balance, how near its last one is found. */
+  private static final double COARSE_TOLERANCE = 0.03;
+
+  /** One go at the whole load; what does not settle then goes to the limit-point search. */
+  private static final EquilibriumSolver.Options ONE_GO =
+      new EquilibriumSolver.Options(1e-10, 25, 0.6);
+
   private final Design design;
   private final Mesh mesh;
   private final GuyPlaces guys;
@@ -195,24 +202,23 @@ public final class MastModel {
     try {
       Equilibrium e =
           EquilibriumSolver.solve(
-              chain,
-              load,
-              1,
-              Optional.of(stillAir.get(loads.pretension())),
-              EquilibriumSolver.Options.USUAL);
+              chain, load, 1, Optional.of(stillAir.get(loads.pretension())), ONE_GO);
       return recovery(loads).response(e, true, 1, Optional.empty());
     } catch (EquilibriumException lost) {
-      return solveWithLimit(loads, 1);
+      return search(loads, 1, COARSE_TOLERANCE);
     }
   }
 
   /** The same with the factor on the variable loads at which the equilibrium is lost. */
   public Response solveWithLimit(LoadCase loads, double capFactor) {
+    return search(loads, capFactor, LIMIT_TOLERANCE);
+  }
+
+  private Response search(LoadCase loads, double capFactor, double tolerance) {
     Chain chain = chainFor(loads);
     ChainLoad load = new LoadMapping(this, loads).chainLoad();
     try {
-      LimitPointSearch.Result found =
-          LimitPointSearch.search(chain, load, capFactor, LIMIT_TOLERANCE);
+      LimitPointSearch.Result found = LimitPointSearch.search(chain, load, capFactor, tolerance);
       Optional<Response.LimitPoint> limit =
           Optional.of(new Response.LimitPoint(found.factor(), found.lost()));
       if (found.factor() < 1) {
