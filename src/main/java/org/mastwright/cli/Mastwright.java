@@ -1,5 +1,6 @@
 package org.mastwright.cli;
 
+import java.io.ByteArrayOutputStream;
 import java.io.IOException;
 import java.io.PrintStream;
 import java.nio.charset.StandardCharsets;
@@ -13,9 +14,12 @@ import java.util.Set;
 import org.mastwright.assess.Assessment;
 import org.mastwright.assess.Assessor;
 import org.mastwright.assess.Progress;
+import org.mastwright.design.Design;
+import org.mastwright.design.Project;
 import org.mastwright.file.Reading;
 import org.mastwright.file.ResultsJson;
 import org.mastwright.file.TowerFiles;
+import org.mastwright.report.Options;
 import org.mastwright.report.ReportException;
 import org.mastwright.report.ReportWriter;
 import org.mastwright.units.UnitSystem;
@@ -166,11 +170,16 @@ public final class Mastwright {
     }
     List<Finding> findings = new java.util.ArrayList<>(reading.findings());
     findings.addAll(reading.faults());
+    if (reading.design().get().verification().isEmpty()) {
+      Thread warming = new Thread(ReportWriter::warmUp, "pdf classes");
+      warming.setDaemon(true);
+      warming.start();
+    }
     Assessment a;
     try {
       a =
           Assessor.assess(
-              reading.design().get(),
+              inUnits(reading.design().get(), common.units),
               new Assessment.InputFile(name, reading.sha256()),
               reading.defaults(),
               findings,
@@ -192,13 +201,43 @@ public final class Mastwright {
             "\r" + words + "  " + done + " of " + of + "\033[K" + (done == of ? "\r\033[K" : ""));
   }
 
-  private UnitSystem units(Common common, Assessment a) {
-    return switch (Optional.ofNullable(common.units).orElse("")) {
-      case "SI" -> UnitSystem.SI;
-      case "US" -> UnitSystem.US;
-      case "both" -> UnitSystem.BOTH;
-      default -> a.design().project().units();
-    };
+  /** The design with the units that were asked for on the command line. */
+  private static Design inUnits(Design d, String asked) {
+    UnitSystem units =
+        switch (Optional.ofNullable(asked).orElse("")) {
+          case "SI" -> UnitSystem.SI;
+          case "US" -> UnitSystem.US;
+          case "both" -> UnitSystem.BOTH;
+          default -> d.project().units();
+        };
+    Project p = d.project();
+    Project project =
+        new Project(
+            p.title(),
+            p.reference(),
+            p.owner(),
+            p.address(),
+            p.parcel(),
+            p.client(),
+            p.date(),
+            p.revision(),
+            p.preparedBy(),
+            p.checkedBy(),
+            p.sheet(),
+            units,
+            p.declination_rad());
+    return new Design(
+        project,
+        d.documents(),
+        d.surroundings(),
+        d.basis(),
+        d.site(),
+        d.turbine(),
+        d.tower(),
+        d.ground(),
+        d.raising(),
+        d.measured(),
+        d.verification());
   }
 
   private int write(Common common, byte[] content, Assessment a, boolean speeds) {
@@ -216,9 +255,9 @@ public final class Mastwright {
         return Exit.NOT_WRITTEN;
       }
       if (!Words.isVerification(a)) {
-        files.put(
-            "report.pdf",
-            ReportWriter.pdf(a, units(common, a), Optional.ofNullable(common.templates)));
+        ByteArrayOutputStream report = new ByteArrayOutputStream();
+        ReportWriter.write(a, report, new Options(Optional.ofNullable(common.templates)));
+        files.put("report.pdf", report.toByteArray());
       }
       files.put("tower-file.yaml", content);
       files.put("results.json", ResultsJson.bytes(a));
@@ -243,7 +282,7 @@ public final class Mastwright {
             ? Words.verification(a)
             : speeds
                 ? Words.speeds(a, common.plain)
-                : Words.summary(a, units(common, a), written, common.plain);
+                : Words.summary(a, a.design().project().units(), written, common.plain);
     lines.forEach(out::println);
   }
 }
