@@ -42,8 +42,9 @@ public record AnswerView(
     List<Fact> around,
     Figure side) {
   private static final int OPEN_LINES = 4;
-  private static final int LONGEST_LINE = 112;
-  private static final int LONGEST_PLACE = 44;
+  private static final int LONGEST_LINE = 92;
+  private static final int LONGEST_PLACE = 30;
+  private static final int FULL_FROM = 11;
   private static final int LONGEST_TITLE = 90;
 
   /** A question with its worst answer; {@code letter} refers to the side view. */
@@ -59,6 +60,11 @@ public record AnswerView(
   /** A line with the chapter that says more; blank when none does. */
   public record Line(String words, String chapter) {}
 
+  /** Whether there is so much on the page that it has to be set closer. */
+  public boolean full() {
+    return rows.size() + open.size() > FULL_FROM;
+  }
+
   static AnswerView of(Assessment a, Print print, Map<String, String> titles) {
     return new AnswerView(
         Print.shorten(Print.words(a.design().project().title()), LONGEST_TITLE),
@@ -67,7 +73,7 @@ public record AnswerView(
         counts(a),
         a.verdict() == Verdict.FAIL ? "DECIDES" : "MOST USED",
         a.governing().map(c -> decides(c)).orElse(""),
-        a.governing().map(CheckView::used).orElse(""),
+        a.governing().map(AnswerView::use).orElse(""),
         a.governing().map(c -> CheckView.caseWords(c.subject().caseId(), titles)).orElse(""),
         who(a.design().project()),
         rows(a),
@@ -87,6 +93,10 @@ public record AnswerView(
 
   private static String decides(Check check) {
     return Print.shorten(check.subject().title() + " " + check.subject().where(), 120);
+  }
+
+  private static String use(Check check) {
+    return check.utilisation().isPresent() ? "used " + CheckView.used(check) : "";
   }
 
   private static String counts(Assessment a) {

@@ -137,8 +137,7 @@ public record CheckView(
         + second
         + " "
         + side(b, units)
-        + ": used "
-        + used(check);
+        + (check.utilisation().isPresent() ? ": used " + used(check) : "");
   }
 
   private static String side(Step step, UnitSystem units) {

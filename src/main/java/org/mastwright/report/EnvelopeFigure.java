@@ -12,9 +12,9 @@ import org.mastwright.units.Unit;
 /** Greatest compression, shear, moment and movement over height, side by side. */
 final class EnvelopeFigure {
   private static final double WIDTH = 136;
-  private static final double HEIGHT = 112;
+  private static final double HEIGHT = 106;
   private static final double TOP = 8;
-  private static final double FOOT = 101;
+  private static final double FOOT = 95;
   private static final double LEFT = 14;
   private static final double PANEL = 25;
   private static final double GAP = 6;

@@ -10,7 +10,7 @@ import org.mastwright.units.Unit;
 /** Forces along the mast and how it swings. */
 public record ForcesView(List<Figure> envelope, Table table, List<Figure> shapes, Table modes) {
   /** More rows than this say no more to a reader. */
-  private static final int MOST_ROWS = 26;
+  private static final int MOST_ROWS = 20;
 
   static ForcesView of(Assessment a, Print print) {
     return new ForcesView(

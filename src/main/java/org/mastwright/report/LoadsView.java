@@ -74,7 +74,7 @@ public record LoadsView(
     List<CaseResult> cases = a.cases().stream().filter(c -> !c.governs().isEmpty()).toList();
     List<Response> responses = cases.stream().map(CaseResult::response).toList();
     return Table.of("The cases that decide a check")
-        .words("case", responses.stream().map(r -> r.mark().id()).toList())
+        .brief("case", responses.stream().map(r -> r.mark().id()).toList())
         .words("what happens", responses.stream().map(r -> r.mark().title()).toList())
         .numbers(
             print.head("push on the machine", Unit.KN),

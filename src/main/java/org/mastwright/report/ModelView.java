@@ -81,7 +81,7 @@ public record ModelView(
         .filter(r -> r.limit().isPresent() || !r.converged())
         .forEach(searched::add);
     return Table.of("How far the variable loads can grow before equilibrium is lost")
-        .words("case", searched.stream().map(r -> r.mark().id()).toList())
+        .brief("case", searched.stream().map(r -> r.mark().id()).toList())
         .words("what happens", searched.stream().map(r -> r.mark().title()).toList())
         .numbers("factor", searched.stream().map(ModelView::factor).toList())
         .words("meaning", searched.stream().map(ModelView::meaning).toList())
@@ -104,7 +104,7 @@ public record ModelView(
   private static Table buckling(Assessment a) {
     List<BucklingResult> rows = a.buckling();
     return Table.of("Linear buckling, for information and no proof")
-        .words("case", rows.stream().map(BucklingResult::caseId).toList())
+        .brief("case", rows.stream().map(BucklingResult::caseId).toList())
         .numbers("factor", rows.stream().map(b -> Print.factor(b.criticalFactor())).toList())
         .build();
   }

@@ -51,6 +51,9 @@ final class PdfPrinter {
       settle(document, mark);
       ByteArrayOutputStream out = new ByteArrayOutputStream();
       document.save(out);
+      if (MissingGlyphs.in(document)) {
+        warnings.add("a character has no glyph in the typefaces of its place");
+      }
       refuse(warnings);
       return out.toByteArray();
     } catch (IOException e) {
@@ -73,6 +76,7 @@ final class PdfPrinter {
     builder.usePdfUaAccessibility(true);
     builder.useColorProfile(ICC_Profile.getInstance(ColorSpace.CS_sRGB).getData());
     builder.useSVGDrawer(drawings);
+    builder.useReplacementText(String.valueOf(ReportFonts.ENGINE_REPLACEMENT));
     refuseOutside(builder, warnings);
     ReportFonts.register(builder);
     builder.withHtmlContent(xhtml, null);

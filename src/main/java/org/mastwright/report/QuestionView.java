@@ -140,7 +140,7 @@ public record QuestionView(
         .numbers(
             print.head("at the anchor", Unit.KN),
             print.column(worst.stream().map(p -> p.guy().tensionAtAnchor_N()).toList(), Unit.KN))
-        .words("case", worst.stream().map(p -> p.response().mark().id()).toList())
+        .brief("case", worst.stream().map(p -> p.response().mark().id()).toList())
         .build();
   }
 }

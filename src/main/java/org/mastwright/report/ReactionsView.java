@@ -39,7 +39,7 @@ public record ReactionsView(List<Table> tables) {
             print.head("moment", Unit.KNM), column(b, BaseReaction::moment_Nm, Unit.KNM, print))
         .numbers(
             print.head("torque", Unit.KNM), column(b, BaseReaction::torque_Nm, Unit.KNM, print))
-        .words("case", rows.stream().map(Reactions.FootReaction::caseId).toList())
+        .brief("case", rows.stream().map(Reactions.FootReaction::caseId).toList())
         .build();
   }
 
@@ -58,7 +58,7 @@ public record ReactionsView(List<Table> tables) {
         .numbers(print.head("level", Unit.KN), column(factored, Vector3::level, Unit.KN, print))
         .numbers(print.head("up", Unit.KN), column(factored, Vector3::up, Unit.KN, print))
         .numbers("towards", factored.stream().map(v -> Print.bearing(v.bearing_rad())).toList())
-        .words("case", rows.stream().map(Reactions.AnchorPull::caseId).toList())
+        .brief("case", rows.stream().map(Reactions.AnchorPull::caseId).toList())
         .numbers(
             print.head("pull without factors", Unit.KN),
             column(plain, Vector3::length, Unit.KN, print))

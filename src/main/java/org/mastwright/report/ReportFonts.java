@@ -22,6 +22,12 @@ public final class ReportFonts {
   /** Stands for a character that cannot be printed. */
   public static final char REPLACEMENT = '□';
 
+  /**
+   * What the PDF engine is told to print for a glyph it does not find, since it does so without a
+   * warning. The printer looks for it in the finished file; from a user it counts as not printable.
+   */
+  static final char ENGINE_REPLACEMENT = '\u02DB';
+
   private static final String FOLDER = "/org/mastwright/fonts/";
 
   /** Up to here (Latin Extended-A but for its gaps) every text face has every character. */
@@ -84,7 +90,9 @@ public final class ReportFonts {
     if (codePoint == '\n' || codePoint == '\t' || codePoint == '\r') {
       return true;
     }
-    if (codePoint < 0x20 || codePoint >= 0x7F && codePoint < 0xA0) {
+    if (codePoint == ENGINE_REPLACEMENT
+        || codePoint < 0x20
+        || codePoint >= 0x7F && codePoint < 0xA0) {
       return false;
     }
     return codePoint <= SURELY_PRINTABLE_TO || Coverage.ALL.contains(codePoint);

@@ -53,6 +53,18 @@ public record ReportView(
           a.version(),
           a.verdict().answer());
     }
+
+    /** Width of the first page between its margins, which are narrower than those that follow. */
+    public String firstWidth() {
+      return sheet.equals("A4") ? "185mm" : "190.9mm";
+    }
+
+    /** What stands at the foot of every page. */
+    public String foot() {
+      String own =
+          "input " + mark + " · mastwright " + version + " · a calculation, not an approval";
+      return reference.isEmpty() ? own : reference + " · " + own;
+    }
   }
 
   static ReportView of(Assessment a, String unprintable) {

@@ -30,11 +30,12 @@ public final class ReportWriter {
    */
   public static String html(Assessment assessment, Options options) {
     Templates templates = new Templates(options);
-    String first = templates.report(ReportView.of(assessment, ""));
-    String missing = ReportFonts.unsupported(first);
-    return missing.isEmpty()
-        ? first
-        : ReportFonts.replaceUnsupported(templates.report(ReportView.of(assessment, missing)));
+    String plain = templates.report(ReportView.of(assessment, ""));
+    String missing = ReportFonts.unsupported(plain);
+    if (!missing.isEmpty()) {
+      plain = ReportFonts.replaceUnsupported(templates.report(ReportView.of(assessment, missing)));
+    }
+    return LongWords.breakable(plain);
   }
 
   /**

@@ -20,7 +20,8 @@ import org.mastwright.units.Unit;
 final class SideFigure {
   private static final double MARGIN_ABOVE = 5;
   private static final double BELOW_GROUND = 11;
-  private static final double ROOM_BESIDE = 9;
+  private static final double LETTER_ROOM = 4.6;
+  private static final double ROOM_BESIDE = 6.2;
 
   private final Svg svg;
   private final Assessment a;
@@ -29,6 +30,7 @@ final class SideFigure {
   private final int ratio;
   private final double axis;
   private final double ground;
+  private final double groundTo;
   private final ToDoubleFunction<Ground.Anchor> across;
   private final boolean lettered;
 
@@ -36,6 +38,7 @@ final class SideFigure {
       Assessment a,
       Print print,
       double width,
+      double room,
       double height,
       ToDoubleFunction<Ground.Anchor> across,
       boolean lettered) {
@@ -44,23 +47,24 @@ final class SideFigure {
     this.print = print;
     this.across = across;
     this.lettered = lettered;
-    this.svg = new Svg(width, height);
     double left = reach(a, across, -1);
     double right = reach(a, across, 1);
     this.ratio =
         Scale.ratio(
             left + right,
-            width - 2 * ROOM_BESIDE,
+            room - 2 * ROOM_BESIDE,
             top_m(a.outline()),
             height - MARGIN_ABOVE - BELOW_GROUND);
     double drawn = Scale.paper_mm(left + right, ratio);
-    this.axis = (width - drawn) / 2 + Scale.paper_mm(left, ratio);
-    this.ground = height - BELOW_GROUND;
+    this.axis = (room - drawn) / 2 + Scale.paper_mm(left, ratio);
+    this.ground = MARGIN_ABOVE + Scale.paper_mm(top_m(a.outline()), ratio);
+    this.groundTo = room - 2;
+    this.svg = new Svg(width, ground + BELOW_GROUND);
   }
 
   /** The lettered side view of the first page. */
   static Figure answer(Assessment a, Print print) {
-    SideFigure f = new SideFigure(a, print, 60, 104, Ground.Anchor::east_m, true);
+    SideFigure f = new SideFigure(a, print, 68, 68, 104, Ground.Anchor::east_m, true);
     f.draw();
     String words = f.legend();
     return new Figure(f.svg.end("Side view from the south, to scale. " + words), words);
@@ -78,7 +82,7 @@ final class SideFigure {
 
   private static Figure elevation(
       Assessment a, Print print, ToDoubleFunction<Ground.Anchor> across, String from) {
-    SideFigure f = new SideFigure(a, print, 136, 104, across, false);
+    SideFigure f = new SideFigure(a, print, 136, 97, 100, across, false);
     f.draw();
     f.heights();
     String words = "Side view " + from + ", 1 to " + f.ratio + ". " + f.summary();
@@ -109,7 +113,7 @@ final class SideFigure {
   }
 
   private void draw() {
-    svg.line(2, ground, axis * 2 > 60 ? 134 : 58, ground, Svg.INK.thick(0.2));
+    svg.line(2, ground, groundTo, ground, Svg.INK.thick(0.2));
     guys();
     mast();
     d.turbine().ifPresent(this::machine);
@@ -220,14 +224,18 @@ final class SideFigure {
   private void letters() {
     Outline o = a.outline();
     if (d.turbine().isPresent()) {
-      svg.letter(axis + 7, y(o.hub_m().orElse(o.mastTop_m())) + 4.2, "A");
+      svg.letter(axis + 8, y(o.hub_m().orElse(o.mastTop_m())) - 3.4, "A");
     }
     double foot = d.tower().footLevel_m();
+    double last = ground;
     for (GuySet set : d.tower().guys()) {
-      svg.letter(axis + 6, y(foot + set.along_m()) + 0.2, "B");
+      double level = y(foot + set.along_m());
+      if (last - level > LETTER_ROOM) {
+        svg.letter(axis - 5, level, "B");
+        last = level;
+      }
     }
-    double middle = d.tower().length_m() * 0.3 + foot;
-    svg.letter(axis - 4.5, y(middle), "C");
+    svg.letter(axis + 4.4, y(foot + d.tower().length_m() * 0.22), "C");
     List<Ground.Anchor> anchors = d.ground().anchors();
     for (Ground.Anchor anchor : anchors) {
       double out = across.applyAsDouble(anchor);

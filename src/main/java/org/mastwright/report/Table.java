@@ -12,6 +12,8 @@ import java.util.List;
  * @param rows cells in the order of the heads
  */
 public record Table(String caption, List<Head> heads, List<Row> rows) {
+  private static final int MANY_ROWS = 12;
+
   public Table {
     heads = List.copyOf(heads);
     rows = List.copyOf(rows);
@@ -38,6 +40,11 @@ public record Table(String caption, List<Head> heads, List<Row> rows) {
   /** Whether there is anything to print. */
   public boolean filled() {
     return !rows.isEmpty();
+  }
+
+  /** Long tables are set closer. */
+  public String style() {
+    return rows.size() > MANY_ROWS ? "close" : "open";
   }
 
   static Builder of(String caption) {

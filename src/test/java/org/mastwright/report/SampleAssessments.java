@@ -88,6 +88,10 @@ final class SampleAssessments {
               new Formula.Var("M_Rd", Unit.KNM)),
           v -> v[0] / (v[1] * v[2]) + v[3] * v[4] / v[5]);
 
+  static final Assessment.InputFile INPUT =
+      new Assessment.InputFile(
+          "bench.yaml", "a41f09c2d5e6b7880102030405060708090a0b0c0d0e0f101112131415161718");
+
   private SampleAssessments() {}
 
   static Assessment of(Design design, Verdict verdict) {
@@ -99,8 +103,7 @@ final class SampleAssessments {
     List<CaseResult> cases = cases(design, checks);
     return new Assessment(
         "1.0",
-        new Assessment.InputFile(
-            "bench.yaml", "a41f09c2d5e6b7880102030405060708090a0b0c0d0e0f101112131415161718"),
+        INPUT,
         design,
         verdict == Verdict.PASS ? List.of() : defaults(),
         verdict == Verdict.PASS ? List.of() : findings(),
@@ -290,8 +293,8 @@ final class SampleAssessments {
         new CombinationSummary(
             "I2",
             "Operation at the greatest thrust",
-            "The rotor pushes hardest while it runs",
             "1.35 G + P + 3.0 T",
+            "The rotor pushes hardest while it runs",
             LimitState.STRENGTH,
             RECALLED,
             factors,
@@ -299,8 +302,8 @@ final class SampleAssessments {
         new CombinationSummary(
             "I11",
             "Everyday extremes",
-            "Lean and clearances",
             "G + P + W",
+            "Lean and clearances",
             LimitState.SERVICE,
             RECALLED,
             List.of(),
