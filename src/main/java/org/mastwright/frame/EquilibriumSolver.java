@@ -10,6 +10,8 @@ public final class EquilibriumSolver {
   /** Largest spin of a node in one iteration. */
   private static final double MOST_SPIN_RAD = 0.5;
 
+  private static final int MOST_HALVINGS = 4;
+
   private EquilibriumSolver() {}
 
   /**
@@ -150,7 +152,7 @@ public final class EquilibriumSolver {
     double residual = a.residual_N();
     double share = 1;
     ChainState best = null;
-    for (int i = 0; i < 6; i++) {
+    for (int i = 0; i < MOST_HALVINGS; i++) {
       ChainState trial = state.copy();
       trial.move(step, share);
       if (balances(a, trial, factor)

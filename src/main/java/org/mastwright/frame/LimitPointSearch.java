@@ -25,7 +25,7 @@ public final class LimitPointSearch {
    */
   public static Result search(
       Chain chain, ChainLoad load, double capFactor, double toleranceFactor) {
-    EquilibriumSolver.Options options = new EquilibriumSolver.Options(1e-10, 20, 1);
+    EquilibriumSolver.Options options = new EquilibriumSolver.Options(1e-10, 14, 1);
     Assembler assembler = new Assembler(chain, load);
     EquilibriumSolver.Attempt last =
         EquilibriumSolver.attempt(assembler, ChainState.atRest(chain), 0, options);

@@ -36,11 +36,11 @@ public final class MastModel {
   private static final double LIMIT_TOLERANCE = 0.01;
 
   /** Where a case has no balance, how near its last one is found. */
-  private static final double COARSE_TOLERANCE = 0.03;
+  private static final double COARSE_TOLERANCE = 0.1;
 
   /** One go at the whole load; what does not settle then goes to the limit-point search. */
   private static final EquilibriumSolver.Options ONE_GO =
-      new EquilibriumSolver.Options(1e-10, 25, 0.6);
+      new EquilibriumSolver.Options(1e-10, 15, 0.6);
 
   private final Design design;
   private final Mesh mesh;
