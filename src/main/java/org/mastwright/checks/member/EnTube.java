@@ -64,7 +64,16 @@ public final class EnTube {
               new Var("M_Rd", Unit.KNM),
               new Var("N", Unit.KN),
               new Var("N_Rd", Unit.KN)),
-          v -> plasticSum(v[0], v[1], v[2], v[3]));
+          v -> v[0] / (v[1] * Math.cos(Math.PI * v[2] / (2 * v[3]))));
+
+  static final Formula SQUASHED =
+      new Formula(
+          "u",
+          Unit.ONE,
+          "{N}/{N_Rd}",
+          en("6.2.4(1), the axial force alone is too much", Status.RECALLED),
+          List.of(new Var("N", Unit.KN), new Var("N_Rd", Unit.KN)),
+          v -> v[0] / v[1]);
 
   static final Formula ELASTIC_SUM =
       new Formula(
@@ -196,8 +205,12 @@ public final class EnTube {
     Step squash = AXIAL.at(s.area_m2(), fy, gammaM);
     double w = kind <= 2 ? s.plasticModulus_m3() : s.elasticModulus_m3();
     Step bending = BENDING.at(w, fy, gammaM);
+    double n = Math.abs(f.axial_N());
     Formula sum = kind <= 2 ? PLASTIC_SUM : ELASTIC_SUM;
-    Step u = sum.at(f.moment_Nm(), bending.si(), Math.abs(f.axial_N()), squash.si());
+    Step u =
+        n < squash.si()
+            ? sum.at(f.moment_Nm(), bending.si(), n, squash.si())
+            : SQUASHED.at(n, squash.si());
     steps.addAll(List.of(squash, bending, u));
     return new Check.Interaction(subject, clause, u, steps, findings);
   }
