@@ -33,6 +33,11 @@ public final class ReportFonts {
   /** Up to here (Latin Extended-A but for its gaps) every text face has every character. */
   private static final int SURELY_PRINTABLE_TO = 0x17F;
 
+  /** Others that every report uses: known without reading the faces, and tested against them. */
+  static final String SURELY_PRINTABLE =
+      "ΑΒΓΔΕΖΗΘΙΚΛΜΝΞΟΠΡΣΤΥΦΧΨΩαβγδεζηθικλμνξοπρςστυφχψω"
+          + "–—‘’“”…−·√≤≥≈≠∞∑→↑↓∅□⁰⁴⁵⁶⁷⁸⁹⁻⁺₀₁₂₃₄₅₆₇₈₉₍₎€";
+
   private record Face(String file, String family, int weight, FontStyle style) {}
 
   private static final List<Face> FACES =
@@ -95,7 +100,14 @@ public final class ReportFonts {
         || codePoint >= 0x7F && codePoint < 0xA0) {
       return false;
     }
-    return codePoint <= SURELY_PRINTABLE_TO || Coverage.ALL.contains(codePoint);
+    return codePoint <= SURELY_PRINTABLE_TO
+        || SURELY_PRINTABLE.indexOf(codePoint) >= 0
+        || isCovered(codePoint);
+  }
+
+  /** Whether a face has the character, from the faces themselves. */
+  static boolean isCovered(int codePoint) {
+    return Coverage.ALL.contains(codePoint);
   }
 
   /** Read only when a character outside plain Latin turns up. */

@@ -21,7 +21,7 @@ final class SideFigure {
   private static final double MARGIN_ABOVE = 5;
   private static final double BELOW_GROUND = 11;
   private static final double LETTER_ROOM = 4.6;
-  private static final double ROOM_BESIDE = 6.2;
+  private static final double ROOM_BESIDE = 4.4;
 
   private final Svg svg;
   private final Assessment a;
@@ -64,7 +64,7 @@ final class SideFigure {
 
   /** The lettered side view of the first page. */
   static Figure answer(Assessment a, Print print) {
-    SideFigure f = new SideFigure(a, print, 68, 68, 104, Ground.Anchor::east_m, true);
+    SideFigure f = new SideFigure(a, print, 64, 64, 104, Ground.Anchor::east_m, true);
     f.draw();
     String words = f.legend();
     return new Figure(f.svg.end("Side view from the south, to scale. " + words), words);
@@ -83,8 +83,8 @@ final class SideFigure {
   private static Figure elevation(
       Assessment a, Print print, ToDoubleFunction<Ground.Anchor> across, String from) {
     SideFigure f = new SideFigure(a, print, 136, 97, 100, across, false);
-    f.draw();
     f.heights();
+    f.draw();
     String words = "Side view " + from + ", 1 to " + f.ratio + ". " + f.summary();
     return new Figure(f.svg.end(words), words);
   }
@@ -240,7 +240,7 @@ final class SideFigure {
     for (Ground.Anchor anchor : anchors) {
       double out = across.applyAsDouble(anchor);
       if (Scale.size(out) > 0.3 * anchor.out_m()) {
-        svg.letter(x(out) + (out > 0 ? 4.2 : -4.2), y(anchor.up_m()) - 2.8, "D");
+        svg.letter(x(out) + (out > 0 ? 1.6 : -1.6), y(anchor.up_m()) - 4.4, "D");
       }
     }
     svg.letter(axis + 6, ground + 4, "E");

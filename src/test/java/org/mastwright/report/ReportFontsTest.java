@@ -1,6 +1,7 @@
 package org.mastwright.report;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import org.junit.jupiter.api.Test;
 
@@ -8,6 +9,16 @@ class ReportFontsTest {
   @Test
   void latinGreekAndSignsArePrintable() {
     assertEquals("", ReportFonts.unsupported("Ärger, œuvre, Łódź, γ_M ≤ √χ² − 10⁻³ · ½ → □ … – °"));
+  }
+
+  @Test
+  void whatIsTakenForPrintableHasAGlyph() {
+    ReportFonts.SURELY_PRINTABLE
+        .codePoints()
+        .forEach(c -> assertTrue(ReportFonts.isCovered(c), Character.getName(c)));
+    for (int c = 0xA0; c <= 0x17F; c++) {
+      assertTrue(ReportFonts.isCovered(c), Character.getName(c));
+    }
   }
 
   @Test
