@@ -54,10 +54,24 @@ public final class MastModel {
     this.guys = new GuyPlaces(design, mesh);
     Chain bare = bare(1, headCentre());
     for (PretensionState state : PretensionState.values()) {
-      double[] lengths =
-          guys.size() == 0 ? new double[0] : Pretension.unstretched_m(bare, guys, state);
+      double[] lengths = guys.size() == 0 ? new double[0] : set(bare, guys, state);
       unstretched_m.put(state, lengths);
       stillAir.put(state, still(Pretension.with(bare, guys, lengths)));
+    }
+  }
+
+  /** Sets the guys; what cannot be set is told in a sentence. */
+  static double[] set(Chain bare, GuyPlaces guys, PretensionState state) {
+    try {
+      return Pretension.unstretched_m(bare, guys, state);
+    } catch (EquilibriumException lost) {
+      throw new AnalysisException(
+          "The guys cannot be set ("
+              + state.name().toLowerCase(java.util.Locale.ROOT)
+              + " tension): "
+              + lost.getMessage()
+              + ". Likely: a tension below what the guy's own weight gives, or a wrong unit.",
+          lost);
     }
   }
 

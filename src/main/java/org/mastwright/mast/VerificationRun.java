@@ -48,9 +48,7 @@ public record VerificationRun(
     GuyPlaces guys = new GuyPlaces(design, mesh);
     Chain bare = bare(design, v, mesh);
     double[] lengths =
-        guys.size() == 0
-            ? new double[0]
-            : Pretension.unstretched_m(bare, guys, PretensionState.NOMINAL);
+        guys.size() == 0 ? new double[0] : MastModel.set(bare, guys, PretensionState.NOMINAL);
     Chain chain = Pretension.with(bare, guys, lengths);
     VibrationSolver.CableMass mass =
         v.guyInertia() ? VibrationSolver.CableMass.SWINGING : VibrationSolver.CableMass.NONE;
