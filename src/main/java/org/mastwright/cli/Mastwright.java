@@ -16,6 +16,7 @@ import org.mastwright.assess.Assessor;
 import org.mastwright.assess.Progress;
 import org.mastwright.design.Design;
 import org.mastwright.design.Project;
+import org.mastwright.file.FaultCatalogue;
 import org.mastwright.file.Reading;
 import org.mastwright.file.ResultsJson;
 import org.mastwright.file.TowerFiles;
@@ -24,6 +25,7 @@ import org.mastwright.report.ReportException;
 import org.mastwright.report.ReportWriter;
 import org.mastwright.units.UnitSystem;
 import org.mastwright.working.AnalysisException;
+import org.mastwright.working.CheckCatalogue;
 import org.mastwright.working.Finding;
 import picocli.CommandLine;
 import picocli.CommandLine.Command;
@@ -50,7 +52,6 @@ public final class Mastwright {
           "new",
           "page",
           "schema",
-          "explain",
           "readback");
 
   private final PrintStream out;
@@ -102,6 +103,7 @@ public final class Mastwright {
     CommandLine line = new CommandLine(program);
     line.addSubcommand("check", program.new CheckCommand());
     line.addSubcommand("speeds", program.new SpeedsCommand());
+    line.addSubcommand("explain", program.new ExplainCommand());
     line.setOut(new java.io.PrintWriter(out, true));
     line.setErr(new java.io.PrintWriter(err, true));
     line.setParameterExceptionHandler(
@@ -148,6 +150,24 @@ public final class Mastwright {
     @Override
     public Integer call() {
       return assess(common, true);
+    }
+  }
+
+  /** {@code explain WORD}. */
+  @Command(name = "explain", description = "more on an error id or a check id")
+  final class ExplainCommand implements java.util.concurrent.Callable<Integer> {
+    @Parameters(paramLabel = "WORD", description = "such as E2 or guy-slack")
+    String word;
+
+    @Override
+    public Integer call() {
+      Optional<String> words = CheckCatalogue.of(word).or(() -> FaultCatalogue.of(word));
+      if (words.isEmpty()) {
+        err.println("mastwright: nothing is known of \"" + word + "\".");
+        return Exit.WRONG_COMMAND;
+      }
+      out.println(word + "  " + words.get());
+      return Exit.PASSES;
     }
   }
 

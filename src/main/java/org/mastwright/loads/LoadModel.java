@@ -221,6 +221,19 @@ public record LoadModel(
                   + " cantilevered blades and at most 200 m² swept; this rotor is outside it.",
               "Use the loads of en-1991-1-4 or asce-7-16 with measured rotor loads."));
     }
+    String terrain = design.site().orElseThrow().wind().terrain();
+    if (List.of("0", "I", "D").contains(terrain)) {
+      all.add(
+          Finding.at(
+              "open-water",
+              Finding.Severity.OPEN_POINT,
+              "site.wind.terrain",
+              "Terrain "
+                  + terrain
+                  + " is smoother than open country: the wind near the ground is stronger there,"
+                  + " and nothing is added for it.",
+              "Give the speed that was measured or mapped for this terrain."));
+    }
     Site.Ice ice = design.site().orElseThrow().ice();
     if (ice instanceof Site.Ice.Thickness || ice instanceof Site.Ice.IsoClass) {
       all.add(

@@ -52,6 +52,17 @@ class ExamplesTest {
     for (String file : List.of("report.pdf", "results.json", "tower-file.yaml")) {
       assertTrue(Files.size(folder.resolve("a").resolve(file)) > 1000, file);
     }
+    String results = Files.readString(folder.resolve("a/results.json"));
+    java.util.regex.Matcher ids =
+        java.util.regex.Pattern.compile(
+                "\"id\" : \"([a-z0-9-]+)\",\\s+\"title\" : \"[^\"]*\",\\s+\"clause\"")
+            .matcher(results);
+    int found = 0;
+    while (ids.find()) {
+      found++;
+      assertEquals(0, run("explain", ids.group(1)), ids.group(1));
+    }
+    assertTrue(found >= 10, "checks " + found);
     assertTrue(Files.readString(Path.of("README.md")).contains("| `" + name + ".yaml` | " + code));
   }
 
