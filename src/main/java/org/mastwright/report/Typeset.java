@@ -117,11 +117,11 @@ final class Typeset {
     }
 
     private String power(FormulaText f) {
-      FormulaText base = f.parts().get(0);
-      String set = set(base, false);
+      String set = set(f.parts().get(0), false);
       String raised = set(f.parts().get(1), false);
       boolean bracket = VALUE_WITH_UNIT.matcher(set).matches();
-      return (bracket ? "(" + set + ")" : set) + "<sup>" + raised + "</sup>";
+      String base = bracket ? set.replace("\">", "\">(").replace("</", ")</") : set;
+      return base + "<sup>" + raised + "</sup>";
     }
 
     private String arguments(FormulaText f) {

@@ -33,7 +33,7 @@ class TypesetTest {
     Step step = SampleAssessments.PRESSURE.at(1.225, 40);
     assertTrue(
         Typeset.numbers(step, UnitSystem.SI)
-            .contains("(<span class=\"v\">40 m/s</span>)<sup>2</sup>"),
+            .contains("<span class=\"v\">(40 m/s)</span><sup>2</sup>"),
         Typeset.numbers(step, UnitSystem.SI));
   }
 
