@@ -92,7 +92,8 @@ public record AnswerView(
   }
 
   private static String decides(Check check) {
-    return Print.shorten(check.subject().title() + " " + check.subject().where(), 120);
+    return Print.shorten(
+        Print.symbols(check.subject().title() + " " + check.subject().where()), 120);
   }
 
   private static String use(Check check) {
@@ -170,7 +171,7 @@ public record AnswerView(
     return new Row(
         question.question(),
         letter(question),
-        Print.shorten(worst.subject().where(), LONGEST_PLACE),
+        Print.shorten(Print.symbols(worst.subject().where()), LONGEST_PLACE),
         CheckView.used(worst),
         CheckView.answer(worst),
         CheckView.style(worst),

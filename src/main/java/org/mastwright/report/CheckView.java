@@ -47,7 +47,7 @@ public record CheckView(
     return new CheckView(
         check.subject().id(),
         check.subject().title(),
-        check.subject().where(),
+        Print.symbols(check.subject().where()),
         caseWords(check.subject().caseId(), caseTitles),
         check.clause().citeWithStatus(),
         used(check),
@@ -55,7 +55,7 @@ public record CheckView(
         style(check),
         StepView.of(steps(check), units),
         comparison(check, units),
-        check instanceof Check.NotAssessed n ? n.reason() : "",
+        check instanceof Check.NotAssessed n ? Print.symbols(n.reason()) : "",
         check.findings().stream().map(CheckView::words).toList(),
         check.subject().why());
   }
@@ -92,7 +92,7 @@ public record CheckView(
 
   static String words(Finding finding) {
     String remedy = finding.remedy().isBlank() ? "" : " " + finding.remedy();
-    return finding.message() + remedy;
+    return Print.symbols(finding.message() + remedy);
   }
 
   private static List<Step> steps(Check check) {

@@ -24,6 +24,9 @@ import org.mastwright.units.Unit;
 public record ModelView(
     List<Fact> facts, List<Fact> balance, Table comparisons, Table limits, Table buckling) {
 
+  /** The lowest factors say what there is to say. */
+  private static final int MOST_LIMITS = 12;
+
   static ModelView of(Assessment a, Print print) {
     return new ModelView(
         facts(a, print), balance(a), comparisons(a.selfCheck()), limits(a), buckling(a));
@@ -80,7 +83,11 @@ public record ModelView(
         .map(CaseResult::response)
         .filter(r -> r.limit().isPresent() || !r.converged())
         .forEach(searched::add);
-    return Table.of("How far the variable loads can grow before equilibrium is lost")
+    int found = searched.size();
+    searched.sort(Comparator.comparingDouble(ModelView::factorOf));
+    searched.subList(found < MOST_LIMITS ? found : MOST_LIMITS, found).clear();
+    String which = found > MOST_LIMITS ? ", the " + MOST_LIMITS + " lowest of " + found : "";
+    return Table.of("How far the variable loads can grow before equilibrium is lost" + which)
         .brief("case", searched.stream().map(r -> r.mark().id()).toList())
         .words("what happens", searched.stream().map(r -> r.mark().title()).toList())
         .numbers("factor", searched.stream().map(ModelView::factor).toList())
@@ -89,7 +96,11 @@ public record ModelView(
   }
 
   private static String factor(Response r) {
-    return Print.factor(r.limit().map(Response.LimitPoint::factor).orElse(r.reachedFactor()));
+    return Print.factor(factorOf(r));
+  }
+
+  private static double factorOf(Response r) {
+    return r.limit().map(Response.LimitPoint::factor).orElse(r.reachedFactor());
   }
 
   private static String meaning(Response r) {

@@ -4,6 +4,7 @@ import java.math.BigDecimal;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.OptionalDouble;
+import java.util.regex.Pattern;
 import org.mastwright.units.Numbers;
 import org.mastwright.units.Unit;
 import org.mastwright.units.UnitSystem;
@@ -12,6 +13,9 @@ import org.mastwright.units.UnitSystem;
 record Print(UnitSystem units) {
   static final String NOT_GIVEN = "not given";
   private static final int FIGURES = 3;
+  private static final int MOST_DECIMALS = 6;
+  private static final Pattern TEMPERATURE = Pattern.compile("(?<=\\d| ) ?deg([CF])\\b");
+  private static final Pattern ANGLE = Pattern.compile("(?<=\\d) deg\\b");
 
   /** A value in the reader's unit or units. */
   String of(double si, Unit unit) {
@@ -53,7 +57,8 @@ record Print(UnitSystem units) {
 
   /** Unit words of the tower file as signs. */
   static String symbols(String printed) {
-    return printed.replace(" degC", " °C").replace(" degF", " °F").replace(" deg", "°");
+    String warm = TEMPERATURE.matcher(printed).replaceAll(" °$1");
+    return ANGLE.matcher(warm).replaceAll("°").replace("1/degF", "1/°F");
   }
 
   /** At most {@code length} characters; what is cut off is marked. */
@@ -109,8 +114,11 @@ record Print(UnitSystem units) {
       return 0;
     }
     int whole = greatest.precision() - greatest.scale();
+    if (whole < -MOST_DECIMALS) {
+      return 0;
+    }
     int decimals = FIGURES - whole;
-    return decimals < 0 ? 0 : decimals > 6 ? 6 : decimals;
+    return decimals < 0 ? 0 : decimals > MOST_DECIMALS ? MOST_DECIMALS : decimals;
   }
 
   /** The first sixteen characters of the input's hash, in fours. */

@@ -1,5 +1,6 @@
 package org.mastwright.report;
 
+import java.util.Comparator;
 import java.util.List;
 import java.util.stream.Collectors;
 import org.mastwright.assess.SpeedResult;
@@ -14,6 +15,7 @@ final class SpeedFigure {
   private static final double RIGHT = 122;
   private static final double TOP = 6;
   private static final double FOOT = 88;
+  private static final double LABEL_ROOM = 2.5;
   private static final Svg.Stroke HATCH = new Svg.Stroke("#c98a63", 0.12, "");
 
   private SpeedFigure() {}
@@ -31,6 +33,7 @@ final class SpeedFigure {
     Axes.side(svg, y, LEFT, RIGHT, 8, "frequency, Hz");
     Axes.foot(svg, x, TOP, FOOT, 8, "rotor speed, rpm");
     s.lines().forEach(b -> band(svg, b, y));
+    labels(svg, s.lines(), y);
     s.orders().forEach(k -> order(svg, k, x, y));
     range(svg, s, x);
     String caption = caption(s);
@@ -53,7 +56,24 @@ final class SpeedFigure {
     svg.rect(LEFT, most, RIGHT - LEFT, least - most, new Svg.Stroke("none", 0, ""), "#d9e4ee");
     svg.line(LEFT, least, RIGHT, least, stroke);
     svg.line(LEFT, most, RIGHT, most, stroke);
-    svg.text(RIGHT + 0.8, (least + most) / 2 + 0.8, 2.1, "mode " + band.mode());
+  }
+
+  /** Mode numbers beside their bands, moved apart where the bands lie close. */
+  private static void labels(Svg svg, List<SpeedResult.FrequencyBand> bands, Scale y) {
+    List<SpeedResult.FrequencyBand> upwards =
+        bands.stream()
+            .sorted(
+                Comparator.comparingDouble(SpeedResult.FrequencyBand::least_Hz)
+                    .thenComparingDouble(SpeedResult.FrequencyBand::greatest_Hz))
+            .toList();
+    double last = FOOT + LABEL_ROOM;
+    for (SpeedResult.FrequencyBand band : upwards) {
+      double middle = (y.at(band.least_Hz()) + y.at(band.greatest_Hz())) / 2;
+      double at = middle > last - LABEL_ROOM ? last - LABEL_ROOM : middle;
+      svg.line(RIGHT, middle, RIGHT + 2, at, Svg.HAIR);
+      svg.text(RIGHT + 2.4, at + 0.7, 2.1, "mode " + band.mode());
+      last = at;
+    }
   }
 
   private static void order(Svg svg, int order, Scale x, Scale y) {

@@ -3,6 +3,7 @@ package org.mastwright.report;
 import java.util.List;
 import java.util.Optional;
 import java.util.function.Function;
+import java.util.regex.Pattern;
 import org.mastwright.units.UnitSystem;
 import org.mastwright.working.Step;
 
@@ -12,6 +13,10 @@ import org.mastwright.working.Step;
 final class Typeset {
   /** A fraction with a longer side than this is set on one line with a slash. */
   private static final int LONGEST_FRACTION = 62;
+
+  /** A value that needs brackets before it is raised to a power; a negative one has them. */
+  private static final Pattern VALUE_WITH_UNIT =
+      Pattern.compile("<span class=\"v\">[^( ]+ [^<]*</span>");
 
   private Typeset() {}
 
@@ -46,7 +51,7 @@ final class Typeset {
     Function<String, String> value = name -> value(step.inputs(), name, units);
     return set(
         step,
-        n -> Svg.escape(value.apply(n)),
+        n -> "<span class=\"v\">" + Svg.escape(value.apply(n)) + "</span>",
         n -> value.apply(n).length(),
         step.substituted(units));
   }
@@ -112,14 +117,11 @@ final class Typeset {
     }
 
     private String power(FormulaText f) {
-      FormulaText base = f.parts().get(0);
-      String set = set(base, false);
-      boolean bracket = base.kind() == FormulaText.Kind.VARIABLE && set.contains(" ");
+      String set = set(f.parts().get(0), false);
       String raised = set(f.parts().get(1), false);
-      return (bracket && !set.startsWith("(") ? "(" + set + ")" : set)
-          + "<sup>"
-          + raised
-          + "</sup>";
+      boolean bracket = VALUE_WITH_UNIT.matcher(set).matches();
+      String base = bracket ? set.replace("\">", "\">(").replace("</", ")</") : set;
+      return base + "<sup>" + raised + "</sup>";
     }
 
     private String arguments(FormulaText f) {

@@ -19,6 +19,8 @@ class PrintTest {
     assertEquals(
         List.of("12.3", "0.5", "−1.0"), SI.column(List.of(12345.0, 500.0, -1000.0), Unit.KN));
     assertEquals(List.of("0", "0"), SI.column(List.of(0.0, 0.0), Unit.KN));
+    assertEquals(List.of("0", "0"), SI.column(List.of(3e-9, -2e-9), Unit.M));
+    assertEquals(List.of("0.000300"), SI.column(List.of(3e-4), Unit.M));
     assertEquals(List.of("1234", "5"), SI.column(List.of(1234.4, 5.0), Unit.M));
   }
 
@@ -40,6 +42,8 @@ class PrintTest {
   void unitWordsBecomeSigns() {
     assertEquals("12.9 °C (55.1 °F)", BOTH.of(286, Unit.DEGC));
     assertEquals("10.0°", SI.of(Math.toRadians(9.999), Unit.DEG));
+    assertEquals("guy at 191°, 5 degrees", Print.symbols("guy at 191 deg, 5 degrees"));
+    assertEquals("temperature, °C", SI.head("temperature", Unit.DEGC));
     assertEquals("180°", Print.bearing(Math.PI));
     assertEquals("22.5°", Print.bearing(Math.PI / 8));
   }

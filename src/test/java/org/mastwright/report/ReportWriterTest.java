@@ -137,6 +137,7 @@ class ReportWriterTest {
     assertTrue(one.contains("Responsible engineer: name"), one);
     assertTrue(one.contains("input a41f 09c2 d5e6 b788"), one);
     assertTrue(pages.get(1).contains("Contents"), pages.get(1));
+    assertTrue(pages.get(1).contains("What was not looked at?"), pages.get(1));
   }
 
   @ParameterizedTest

@@ -32,8 +32,17 @@ class TypesetTest {
   void aPowerOfAValueWithAUnitIsBracketed() {
     Step step = SampleAssessments.PRESSURE.at(1.225, 40);
     assertTrue(
-        Typeset.numbers(step, UnitSystem.SI).contains("(40 m/s)<sup>2</sup>"),
+        Typeset.numbers(step, UnitSystem.SI)
+            .contains("<span class=\"v\">(40 m/s)</span><sup>2</sup>"),
         Typeset.numbers(step, UnitSystem.SI));
+  }
+
+  @Test
+  void aBareNumberAndASymbolAreNotBracketed() {
+    Step step = SampleAssessments.REDUCTION.at(1.2, 0.9);
+    assertTrue(
+        Typeset.numbers(step, UnitSystem.SI).contains("<span class=\"v\">1.200</span><sup>"));
+    assertTrue(Typeset.formula(step).contains("<i>Φ</i><sup>2</sup>"), Typeset.formula(step));
   }
 
   @Test
