@@ -128,14 +128,18 @@ public final class ClearanceChecks {
   }
 
   /**
-   * The blades in all yaw directions fill a sphere about the hub's place on the axis, of radius
-   * {@code √(R² + overhang²)}, cut off level at R above and below; tilt and cone lower the cut by
-   * nothing and widen the sphere by nothing.
+   * Whichever way the head is turned, tilted or leaning, every blade tip keeps one distance from
+   * the point where the shaft meets the tower axis: {@code √((R cos β)² + (o + R sin β)²)} with
+   * overhang {@code o} and cone {@code β}, taken outwards. The space swept is that sphere. The
+   * point lies {@code o sin τ} below the hub under the tilt {@code τ}. Blades are taken as stiff.
+   *
+   * @return distance from the sphere to the guy, both moved; negative when the guy is inside
    */
   static double distance_m(Design design, TopMovement top, GuyForces guy) {
     Turbine turbine = design.turbine().orElseThrow();
     Rotor rotor = turbine.rotor();
-    double above = turbine.head().hubAboveTop_m();
+    double radius = reach_m(rotor.radius_m(), rotor.overhang_m(), rotor.cone_rad());
+    double above = turbine.head().hubAboveTop_m() - rotor.overhang_m() * Math.sin(rotor.tilt_rad());
     double lean = above * Math.sin(top.tilt_rad());
     Vector3 centre =
         new Vector3(
@@ -148,20 +152,16 @@ public final class ClearanceChecks {
       for (int p = 0; p <= PIECES; p++) {
         double t = (double) p / PIECES;
         Vector3 at = shape.get(i - 1).times(1 - t).plus(shape.get(i).times(t));
-        least = Math.min(least, outside_m(at.minus(centre), rotor));
+        least = Math.min(least, at.minus(centre).length() - radius);
       }
     }
     return least;
   }
 
-  private static double outside_m(Vector3 from, Rotor rotor) {
-    double radius = rotor.radius_m();
-    double overhang = rotor.overhang_m();
-    double out = from.level();
-    if (Math.abs(from.up()) <= radius) {
-      return from.length() - Math.hypot(radius, overhang);
-    }
-    return Math.hypot(Math.max(0, out - overhang), Math.abs(from.up()) - radius);
+  /** Distance of a blade tip from the point where the shaft meets the tower axis. */
+  static double reach_m(double radius_m, double overhang_m, double cone_rad) {
+    return Math.hypot(
+        radius_m * Math.cos(cone_rad), overhang_m + radius_m * Math.sin(Math.abs(cone_rad)));
   }
 
   private static void surroundings(
