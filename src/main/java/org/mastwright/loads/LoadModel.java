@@ -208,7 +208,7 @@ public record LoadModel(
     List<Finding> all = new ArrayList<>();
     Rotor rotor = design.turbine().orElseThrow().rotor();
     boolean inside =
-        !rotor.kind().isUpright()
+        rotor.kind() == Rotor.Kind.PROPELLER
             && rotor.blades() >= 2
             && rotor.sweptArea_m2() <= GREATEST_SWEPT_M2;
     if (!inside) {
@@ -217,7 +217,7 @@ public record LoadModel(
               "iec-outside",
               Finding.Severity.OPEN_POINT,
               "basis.loads",
-              "The simplified model of IEC 61400-2 holds for horizontal axis, two or more"
+              "The simplified model of IEC 61400-2 holds for propeller rotors with two or more"
                   + " cantilevered blades and at most 200 m² swept; this rotor is outside it.",
               "Use the loads of en-1991-1-4 or asce-7-16 with measured rotor loads."));
     }

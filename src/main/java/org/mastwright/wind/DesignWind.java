@@ -89,11 +89,11 @@ public record DesignWind(
             s.speed_mps(),
             Unit.MPS,
             GIVEN));
-    Step fifty = IecWind.TO_FIFTY_YEARS.at(s.speed_mps(), s.level().returnPeriod_yr());
-    steps.add(fifty);
+    Step fifty = fiftyYear(s, steps);
     double time_s = s.averaging().time_s(s.speed_mps());
     if (s.averaging() == SiteWind.Averaging.TEN_MINUTES) {
-      Step hub = IecWind.TO_HUB.at(fifty.si(), hub_m, s.height_m(), GUST_EXPONENT);
+      Step hub =
+          IecWind.TO_HUB.at(fifty.si(), hub_m, s.height_m(), meanExponent(hub_m, s.height_m()));
       steps.add(hub);
       return hub.si();
     }
@@ -104,6 +104,27 @@ public record DesignWind(
     Step reference = IecWind.REFERENCE_FROM_GUST.at(hub.si());
     steps.addAll(List.of(short3, stated, gust, hub, reference));
     return reference.si();
+  }
+
+  /**
+   * A map of ultimate speeds is undone by the curve it was made with; any other return period by
+   * that curve and by EN 1991-1-4, and the greater speed counts.
+   */
+  private static Step fiftyYear(SiteWind.Stated.Speed s, List<Step> steps) {
+    double years = s.level().returnPeriod_yr();
+    Step american = IecWind.TO_FIFTY_YEARS.at(s.speed_mps(), years);
+    steps.add(american);
+    if (s.level() instanceof SiteWind.Level.Ultimate || years <= 1) {
+      return american;
+    }
+    Step european = IecWind.TO_FIFTY_YEARS_EN.at(s.speed_mps(), years);
+    steps.add(european);
+    return european.si() > american.si() ? european : american;
+  }
+
+  /** Of a mean speed: the normal profile upwards, the flatter gust profile downwards. */
+  private static double meanExponent(double hub_m, double stated_m) {
+    return hub_m > stated_m ? MEAN_EXPONENT : GUST_EXPONENT;
   }
 
   private static String years(SiteWind.Stated.Speed s) {

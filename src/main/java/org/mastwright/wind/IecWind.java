@@ -61,6 +61,16 @@ public final class IecWind {
           List.of(new Var("V_T", Unit.MPS), new Var("T", Unit.ONE)),
           v -> fiftyYear_mps(v[0], v[1]));
 
+  /** The same by EN 1991-1-4, shape 0.2, exponent 0.5. */
+  public static final Formula TO_FIFTY_YEARS_EN =
+      new Formula(
+          "V_50",
+          Unit.MPS,
+          "{V_T}/√((1 − 0.2·ln(−ln(1 − 1/{T})))/(1 − 0.2·ln(−ln(0.98))))",
+          new Clause("EN 1991-1-4", "2005", "4.2 note 4", Status.READ),
+          List.of(new Var("V_T", Unit.MPS), new Var("T", Unit.ONE)),
+          v -> fiftyYearEn_mps(v[0], v[1]));
+
   /** Ratio of a mean over {@code t} to the hourly mean: a fit to the Durst curve. */
   public static final Formula DURST =
       new Formula(
@@ -102,12 +112,12 @@ public final class IecWind {
           List.of(new Var("ρ", Unit.KGPM3), new Var("V", Unit.MPS)),
           v -> pressure_Pa(v[0], v[1]));
 
-  /** ISA pressure over the gas law at 15 °C. */
+  /** Pressure and temperature of the standard atmosphere in the gas law. */
   public static final Formula DENSITY =
       new Formula(
           "ρ",
           Unit.KGPM3,
-          "101325·(1 − 2.25577·10^(−5)·{h})^5.25588/(287.05·288.15)",
+          "101325·(1 − 2.25577·10^(−5)·{h})^5.25588/(287.05·(288.15 − 0.0065·{h}))",
           new Clause("ISO 2533", "1975", "standard atmosphere", Status.RECALLED),
           List.of(new Var("h", Unit.M)),
           v -> density_kgpm3(v[0]));
@@ -116,7 +126,9 @@ public final class IecWind {
 
   /** Valid up to 11 km. */
   public static double density_kgpm3(double altitude_m) {
-    return 101325 * Math.pow(1 - 2.25577e-5 * altitude_m, 5.25588) / (287.05 * 288.15);
+    return 101325
+        * Math.pow(1 - 2.25577e-5 * altitude_m, 5.25588)
+        / (287.05 * (288.15 - 0.0065 * altitude_m));
   }
 
   public static double pressure_Pa(double density_kgpm3, double speed_mps) {
@@ -134,6 +146,13 @@ public final class IecWind {
   /** Valid from about 5 to 3000 years. */
   public static double fiftyYear_mps(double speed_mps, double returnPeriodCoefficient) {
     return speed_mps / (0.36 + 0.1 * Math.log(12 * returnPeriodCoefficient));
+  }
+
+  /** Valid above one year. */
+  public static double fiftyYearEn_mps(double speed_mps, double returnPeriodCoefficient) {
+    double period = 1 - 0.2 * Math.log(-Math.log(1 - 1 / returnPeriodCoefficient));
+    double fifty = 1 - 0.2 * Math.log(-Math.log(0.98));
+    return speed_mps / Math.sqrt(period / fifty);
   }
 
   /** Valid from 1 s to 1 h. */

@@ -45,4 +45,22 @@ class WindPublishedTest {
     assertEquals(1, IecWind.fiftyYear_mps(1, 50), 5e-4);
     assertEquals(1.6, 1 / Math.pow(IecWind.fiftyYear_mps(1, 700), 2), 0.01);
   }
+
+  @Test
+  @Source(key = "EN 1991-1-4", locator = "4.2 note 4, value 4.5", status = "read, recomputed")
+  void value4_5_returnPeriod() {
+    double[] years = {10, 25, 50, 500};
+    double[] factor = {.90248, .95968, 1, 1.12236};
+    for (int i = 0; i < years.length; i++) {
+      assertEquals(factor[i], 1 / IecWind.fiftyYearEn_mps(1, years[i]), 1e-5);
+    }
+  }
+
+  /** The standard atmosphere's table: 1.1117 kg/m³ at 1000 m, 1.0066 at 2000 m. */
+  @Test
+  @Source(key = "ISO 2533", locator = "table of densities", status = "recalled")
+  void densityByHeight() {
+    assertEquals(1.1117, IecWind.density_kgpm3(1000), 1e-3);
+    assertEquals(1.0066, IecWind.density_kgpm3(2000), 1e-3);
+  }
 }
