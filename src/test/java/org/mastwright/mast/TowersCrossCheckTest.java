@@ -171,4 +171,41 @@ class TowersCrossCheckTest {
             / b.modes().get(0).modes().get(0).frequency_Hz(),
         1e-3);
   }
+
+  private static double set(String tension) throws IOException {
+    String text =
+        example("ridge-school").replace("tension: 4 kN, tension-at: anchor", "tension: " + tension);
+    return MastModel.of(read(text)).stillAirTension_N(PretensionState.NOMINAL, 1, 0).orElseThrow();
+  }
+
+  /** Share: a tenth of 53 kN. Pulse: T = m (2 L N / t)². Sag: w l L / 8 s, within the parabola. */
+  @Test
+  void tensionIsSetByShareByPulseAndBySag() throws IOException {
+    double chord = Math.hypot(14 - 0.1397 / 2, 7.5);
+    assertEquals(5300, set("10 % of breaking"), 0.1);
+    double speed = 2 * chord * 10 / 3.0;
+    assertEquals(0.316 * speed * speed, set("{pulse: {returns: 10, time: 3 s}}"), 0.1);
+    double weight = 0.316 * 9.80665;
+    double parabola = weight * (14 - 0.1397 / 2) * chord / (8 * 0.03);
+    assertEquals(1, set("{sag: 30 mm}") / parabola, 0.01);
+  }
+
+  @Test
+  void slopingGroundStillLeavesTheMastPlumb() throws IOException {
+    String text =
+        example("ridge-school")
+            .replace(
+                "{name: e, bearing: 90 deg, out: 14 m, eye: 0 m",
+                "{name: e, bearing: 90 deg, out: 12 m, eye: -1.5 m")
+            .replace(
+                "{name: w, bearing: 270 deg, out: 14 m, eye: 0 m",
+                "{name: w, bearing: 270 deg, out: 15 m, eye: 1 m");
+    MastModel model = MastModel.of(read(text));
+    assertEquals(4000, model.stillAirTension_N(PretensionState.NOMINAL, 1, 0).orElseThrow(), 0.1);
+    Equilibrium still = model.stillAir(PretensionState.NOMINAL);
+    for (GuyPlaces.Place g : model.guys().all()) {
+      Chain.Point moved = still.movement_m(g.node());
+      assertEquals(0, Math.hypot(moved.x_m(), moved.y_m()), 1e-6);
+    }
+  }
 }
