@@ -32,6 +32,9 @@ public final class Assessor {
 
   private static final double SOUND_RATIO = 1e-3;
 
+  /** The second method takes the bent axis as straight between nodes. */
+  private static final double SECOND_METHOD_RATIO = 0.02;
+
   private Assessor() {}
 
   /**
@@ -83,7 +86,9 @@ public final class Assessor {
     findings.addAll(loads.findings());
     findings.addAll(speeds.findings());
     checks.forEach(c -> findings.addAll(c.findings()));
-    if (!(self.equilibriumRatio() <= SOUND_RATIO) || !self.modeCount()) {
+    if (!(self.equilibriumRatio() <= SOUND_RATIO)
+        || !(self.secondMethodRatio() <= SECOND_METHOD_RATIO)
+        || !self.modeCount()) {
       findings.add(
           Finding.of(
               "self-check",

@@ -41,6 +41,17 @@ final class SelfChecks {
               "moments of all above on the deformed shape",
               byStatics,
               "N·m"));
+      double atFoot = statics.momentAt_Nm(worst.get().response().stations().get(0));
+      double base = worst.get().response().base().moment_Nm();
+      apart = Math.max(apart, Math.abs(atFoot - base) / s.moment_Nm());
+      rows.add(
+          new SelfCheck.Row(
+              "moment at the foot, " + id,
+              "reaction of the foot",
+              base,
+              "moments of all above on the deformed shape",
+              atFoot,
+              "N·m"));
       Vector3 applied = statics.applied_N();
       Vector3 held = statics.reactions_N();
       rows.add(

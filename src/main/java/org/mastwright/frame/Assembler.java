@@ -299,16 +299,28 @@ final class Assembler {
     }
   }
 
-  private void addSpring(ChainState state, boolean tangential) {
+  private boolean sprung() {
     double k = chain.base().spring_Nmprad();
-    if (k == 0 || Double.isInfinite(k)) {
+    return k > 0 && !Double.isInfinite(k);
+  }
+
+  /** What the base's spring does to node 0: a moment against its turning; zero without one. */
+  double[] springMoment(ChainState state) {
+    return sprung()
+        ? times(
+            -chain.base().spring_Nmprad(), apply(free, Algebra.rotationVector(state.rotation[0])))
+        : new double[3];
+  }
+
+  private void addSpring(ChainState state, boolean tangential) {
+    if (!sprung()) {
       return;
     }
-    double[] turn = apply(free, Algebra.rotationVector(state.rotation[0]));
+    double[] moment = springMoment(state);
     for (int i = 0; i < 3; i++) {
-      whole[3 + i] -= k * turn[i];
+      whole[3 + i] += moment[i];
       for (int j = 0; j < 3 && tangential; j++) {
-        tangent.diagonal[0][6 * (i + 3) + j + 3] += k * free[3 * i + j];
+        tangent.diagonal[0][6 * (i + 3) + j + 3] += chain.base().spring_Nmprad() * free[3 * i + j];
       }
     }
   }

@@ -78,11 +78,15 @@ public final class Equilibrium {
     this.negativePivots = negativePivots;
     this.beamEnds = ends(a, state, factor);
     this.cables = cableForces(a);
-    this.base =
-        new BeamEnd(
-            components(a.whole, 0, -1),
-            components(a.whole, 3, -1),
-            new ChainLoad.Components(0, 0, 1));
+    this.base = reaction(a, state);
+  }
+
+  /** What holds node 0: the directions that are held, and the spring. */
+  private static BeamEnd reaction(Assembler a, ChainState state) {
+    double[] held = {-a.whole[3], -a.whole[4], -a.whole[5]};
+    double[] moment = Algebra.plus(held, a.springMoment(state));
+    return new BeamEnd(
+        components(a.whole, 0, -1), components(moment, 0, 1), new ChainLoad.Components(0, 0, 1));
   }
 
   private static ChainLoad.Components components(double[] a, int at, double sign) {

@@ -252,7 +252,8 @@ public record LoadModel(
             "Of the simplified model the cases D, H and I are calculated. Yawing (B), yaw error"
                 + " (C), maximum speed (E), short circuit (F), braking (G) and handling (J) are"
                 + " not, nor fatigue (A).",
-            "Let a licensed engineer judge whether one of them governs this tower."));
+            "Let a licensed engineer judge whether case B, C, E, F, G or J of IEC 61400-2, or fatigue,"
+                + " governs this tower."));
     return all;
   }
 }

@@ -139,4 +139,16 @@ class ExamplesTest {
         folder.resolve("p").toString());
     assertTrue(out.toString(StandardCharsets.UTF_8).chars().allMatch(c -> c < 128));
   }
+
+  /** Two routes to the same moments, in the file that others read. */
+  @ParameterizedTest
+  @ValueSource(strings = {"gravel-bench", "harbour-workshop", "ridge-school"})
+  void secondMethodAgrees(String name) throws IOException {
+    run("check", "examples/" + name + ".yaml", "--into", folder.resolve("s").toString());
+    java.util.regex.Matcher second =
+        java.util.regex.Pattern.compile("\"second_method\" : ([0-9.eE-]+)")
+            .matcher(Files.readString(folder.resolve("s/results.json")));
+    assertTrue(second.find());
+    assertTrue(Double.parseDouble(second.group(1)) < 0.02, second.group(1));
+  }
 }

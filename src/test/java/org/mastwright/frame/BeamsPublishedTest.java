@@ -222,4 +222,21 @@ class BeamsPublishedTest {
       assertEquals(-down[i], b.movement_m(60).z_m(), 2e-5);
     }
   }
+
+  /**
+   * A level push F at the top of a column of length L bends the foot by F·L, however it is held.
+   */
+  @Test
+  @Source(key = "statics", locator = "moment of a force about the foot", status = "practice")
+  void footBearsTheMomentOnASpringAsOnAClamp() {
+    double push = 1000;
+    Chain.Beam tube = new Chain.Beam(1.1e9, 6.2e6, 4.8e6, Double.POSITIVE_INFINITY, 0, 0, 0);
+    for (Chain.Base base : List.of(Chain.Base.clamped(), Chain.Base.sprung(5e6))) {
+      Chain chain = Chains.column(6, 20, s -> tube, base);
+      Equilibrium b = EquilibriumSolver.solve(chain, Chains.force(20, push, 0, 0));
+      // the lever shortens by a few hundredths of a millimetre as the column leans
+      assertEquals(-6 * push, b.baseMoment_Nm().y(), 1e-4 * 6 * push);
+      assertEquals(-push, b.baseForce_N().x(), 1e-8 * push);
+    }
+  }
 }
