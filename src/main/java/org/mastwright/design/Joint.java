@@ -8,6 +8,7 @@ import java.util.OptionalDouble;
  *
  * @param along_m from the mast foot
  * @param detailCategory_Pa fatigue category stated by the user
+ * @param preload_N of one bolt, as stated
  * @param lengths further dimensions by key in metres, such as {@code plate}, {@code overlap}
  * @param words further words by key, such as {@code grade}, {@code shape}
  */
@@ -15,6 +16,7 @@ public record Joint(
     double along_m,
     Kind kind,
     OptionalDouble detailCategory_Pa,
+    OptionalDouble preload_N,
     Map<String, Double> lengths,
     Map<String, String> words,
     int bolts) {

@@ -10,6 +10,7 @@ import java.util.List;
  * @param dampingRatio structural damping of the first mode over critical
  * @param outOfPlumbRatio lean of the axis as built
  * @param guys bottom to top; empty for a monopole
+ * @param openings hand holes and doors
  */
 public record Tower(
     Kind kind,
@@ -20,8 +21,10 @@ public record Tower(
     double dampingRatio,
     double outOfPlumbRatio,
     List<Attachment> attachments,
-    List<GuySet> guys) {
+    List<GuySet> guys,
+    List<Opening> openings) {
   public Tower {
+    openings = List.copyOf(openings);
     tubes = List.copyOf(tubes);
     joints = List.copyOf(joints);
     attachments = List.copyOf(attachments);
@@ -82,4 +85,7 @@ public record Tower(
    */
   public record Attachment(
       String what, double bottom_m, double top_m, double mass_kg, double dragArea_m2) {}
+
+  /** A hole in the tube: its centre along the mast, level width, upright length, bearing. */
+  public record Opening(double along_m, double width_m, double tall_m, double facing_rad) {}
 }

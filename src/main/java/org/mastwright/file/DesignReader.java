@@ -12,6 +12,7 @@ import org.mastwright.design.Basis;
 import org.mastwright.design.Design;
 import org.mastwright.design.Ground;
 import org.mastwright.design.Project;
+import org.mastwright.design.Raising;
 import org.mastwright.design.Site;
 import org.mastwright.design.Surroundings;
 import org.mastwright.design.Tower;
@@ -19,7 +20,6 @@ import org.mastwright.design.Turbine;
 import org.mastwright.design.Verification;
 import org.mastwright.units.Dimension;
 import org.mastwright.units.UnitSystem;
-import org.mastwright.working.DefaultTaken.Side;
 
 /** The whole file, part by part. */
 final class DesignReader {
@@ -49,63 +49,94 @@ final class DesignReader {
     if (basis.isEmpty() && !verification) {
       top.need("basis", "missing", "By which standards should it be judged?");
     }
-    Optional<Site> site = top.get("site").map(k -> new SiteReader(k, basis).read());
+    Optional<Site> site = top.get("site").map(k -> new SiteReader(k, declination_rad).read());
     if (site.isEmpty() && !verification) {
       top.need("site", "missing", "Where it stands is not given.");
     }
-    TowerReader towers = new TowerReader(top, declination_rad);
     Optional<Key> towerKey = top.need("tower", "missing", "There is no tower in the file.");
+    GroundReader earth = new GroundReader(faults, declination_rad);
+    Optional<Ground.Foundation> footing = earth.read(top.get("ground"));
     if (towerKey.isEmpty()) {
       return null;
     }
-    Ground ground = towers.readAnchors();
-    Tower tower = towers.read(towerKey.get(), verification);
-    ground = new Ground(towers.anchors(), ground.foundation());
+    Tower tower =
+        new TowerReader(faults, declination_rad, earth).read(towerKey.get(), verification);
+    Ground ground = new Ground(earth.anchors(), footing);
+    askForAnchors(ground, verification);
     Optional<Turbine> turbine =
-        verification
-            ? Optional.empty()
-            : top.get("turbine").map(k -> new TurbineReader(k, site).read());
+        verification ? Optional.empty() : top.get("turbine").map(k -> new TurbineReader(k).read());
     if (turbine.isEmpty() && !verification) {
       top.need("turbine", "missing", "There is no turbine in the file.");
     }
-    if (verification) {
-      top.known("turbine");
-    }
-    laterParts();
+    Optional<Raising> raising = top.get("raising").flatMap(k -> raising(k, tower, ground));
+    List<Design.CountedSwings> measured = measured();
     Optional<Verification> check =
         top.get("verification").map(k -> new VerificationReader(k).read());
     top.close();
     if (faults.hasErrors()) {
       return null;
     }
-    turbine.ifPresent(t -> Plausibility.check(top, tower, t, faults));
-    return new Design(
-        project,
-        papers,
-        surroundings,
-        basis,
-        site,
-        turbine,
-        tower,
-        ground,
-        Optional.empty(),
-        List.of(),
-        check);
+    Design design =
+        new Design(
+            project,
+            papers,
+            surroundings,
+            basis,
+            site,
+            turbine,
+            tower,
+            ground,
+            raising,
+            measured,
+            check);
+    if (!verification) {
+      Plausibility.check(top, design);
+    }
+    return design;
   }
 
-  /** Parts that are known and that nothing is calculated from yet. */
-  private void laterParts() {
-    top.get("raising")
-        .ifPresent(
-            k ->
-                faults.open(
-                    "raising-not-checked",
-                    "raising",
-                    "Raising is described and not checked: read, not yet used.",
-                    "Have the lift planned by someone who does it for a living."));
+  private void askForAnchors(Ground ground, boolean verification) {
+    boolean some =
+        ground.anchors().stream().anyMatch(a -> a.kind() instanceof Ground.Kind.NotDescribed);
+    if (some && !verification && !faults.hasErrors()) {
+      faults.open(
+          "anchors-not-described",
+          "ground.anchors",
+          "Guys in short form end at anchors that are not described: what these hold is not"
+              + " checked.",
+          "Describe them in ground.anchors, by name or with `for:`.");
+    }
+  }
+
+  private Optional<Raising> raising(Key k, Tower tower, Ground ground) {
+    faults.open(
+        "raising-not-checked",
+        "raising",
+        "Raising is described and not checked: read, not yet used.",
+        "Have the lift planned by someone who does it for a living.");
+    MastPlaces places = new MastPlaces(tower.footLevel_m(), tower.tubes());
+    return new RaisingReader(k, places, declination_rad)
+        .read(tower.guys().size(), ground.anchors().stream().map(Ground.Anchor::name).toList());
+  }
+
+  private List<Design.CountedSwings> measured() {
+    List<Design.CountedSwings> all = new ArrayList<>();
     top.get("measured")
         .ifPresent(
-            k -> faults.note("read-not-used", "measured", "Counted swings: read, not yet used."));
+            list -> {
+              for (Key m : list.items()) {
+                m.need("swings", "missing", "How many swings were counted?");
+                all.add(
+                    new Design.CountedSwings(
+                        m.choice("what", "mast"),
+                        m.choice("state"),
+                        m.text("direction", ""),
+                        m.integer("swings", 1)
+                            / m.required("time", Dimension.TIME, "In what time?")));
+                m.close();
+              }
+            });
+    return all;
   }
 
   private Project project() {
@@ -156,7 +187,10 @@ final class DesignReader {
       }
       return;
     }
-    k.known("bearings");
+    boolean magnetic = k.choice("bearings", "magnetic").equals("magnetic");
+    if (magnetic) {
+      k.need("declination", "missing", "Where does magnetic north lie here?");
+    }
     k.get("declination")
         .ifPresent(
             d -> {
@@ -164,7 +198,7 @@ final class DesignReader {
               String number = d.text().replace("east", "").replace("west", "").trim();
               try {
                 double v = org.mastwright.units.Quantities.read(number, Dimension.ANGLE);
-                declination_rad = west ? -v : v;
+                declination_rad = !magnetic ? 0 : west ? -v : v;
               } catch (org.mastwright.units.Quantities.Unreadable wrong) {
                 d.error(wrong.id(), wrong.getMessage(), "Write 11 deg east.");
               }
@@ -240,6 +274,7 @@ final class DesignReader {
                     new Surroundings.Runway(
                         k.value("distance", Dimension.LENGTH).orElse(Double.NaN),
                         k.value("length", Dimension.LENGTH).orElse(Double.NaN)));
+    runway.ifPresent(r -> s.get("runway").orElseThrow().close());
     Surroundings all =
         new Surroundings(
             lines, wire, runway, setback, s.positive("lowest-blade-rule", Dimension.LENGTH));
@@ -287,19 +322,26 @@ final class DesignReader {
                     "basis.also",
                     "Further bases are named; this version calculates one.",
                     "Leave basis.also out, or have the other basis checked separately."));
+    List<Basis.LoadBasis> also = new ArrayList<>();
+    b.get("also")
+        .ifPresent(list -> list.items().forEach(k -> loadBasis(k.text()).ifPresent(also::add)));
     Map<String, Double> nation = new LinkedHashMap<>();
-    b.known("nation");
-    if (b.has("nation")) {
-      faults.open("read-not-used", "basis.nation", "National values: read, not yet used.", "");
-    }
+    b.get("nation")
+        .ifPresent(
+            n -> {
+              for (String key : KeyCatalogue.at(n.path()).orElseThrow().keys().keySet()) {
+                n.positive(key, Dimension.ONE).ifPresent(v -> nation.put(key, v));
+              }
+              n.close();
+            });
     Basis basis =
         new Basis(
             Basis.LoadBasis.IEC_61400_2,
             s == null ? Basis.StrengthBasis.EN_1993 : s,
-            List.of(),
-            b.integer("reliability-class", 2),
-            b.value("service-life", Dimension.TIME).orElse(20 * 365.25 * 86400),
-            b.text("robust", "not-required").equals("required"),
+            also,
+            reliabilityClass(b),
+            b.positive("service-life", Dimension.TIME).orElse(20 * 365.25 * 86400),
+            b.choice("robust", "not-required").equals("required"),
             nation);
     if (basis.robust()) {
       faults.open(
@@ -312,7 +354,20 @@ final class DesignReader {
     return basis;
   }
 
-  static void taken(Faults f, String path, String value, String source, Side side) {
-    f.taken(path, value, source, side);
+  private static Optional<Basis.LoadBasis> loadBasis(String word) {
+    for (Basis.LoadBasis x : Basis.LoadBasis.values()) {
+      if (x.key().equals(word)) {
+        return Optional.of(x);
+      }
+    }
+    return Optional.empty();
+  }
+
+  private static int reliabilityClass(Key b) {
+    int rc = b.integer("reliability-class", 2);
+    if (rc < 1 || rc > 3) {
+      b.get("reliability-class").orElseThrow().error("range", "is 1, 2 or 3.", "Write 2.");
+    }
+    return rc;
   }
 }

@@ -1,15 +1,24 @@
 package org.mastwright.file;
 
+import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import org.mastwright.working.DefaultTaken;
 import org.mastwright.working.Finding;
 
 /** Everything found while reading one file, in the order found. */
 final class Faults {
+  /** Where the tower file lies; empty when it came from standard input. */
+  final Optional<Path> folder;
+
   final List<Finding> all = new ArrayList<>();
   final List<Finding> findings = new ArrayList<>();
   final List<DefaultTaken> defaults = new ArrayList<>();
+
+  Faults(Optional<Path> folder) {
+    this.folder = folder;
+  }
 
   void error(String id, Key at, String message, String remedy) {
     all.add(

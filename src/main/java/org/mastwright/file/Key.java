@@ -3,6 +3,7 @@ package org.mastwright.file;
 import java.util.ArrayList;
 import java.util.LinkedHashSet;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.Set;
@@ -66,8 +67,9 @@ final class Key {
     return path.isEmpty() ? key : path + "." + key;
   }
 
-  /** A key of this mapping, if it is there. */
+  /** A key of this mapping, if it is there; it must stand in the catalogue. */
   Optional<Key> get(String key) {
+    assert KeyCatalogue.at(join(key)).isPresent() : join(key) + " is not in the catalogue of keys";
     asked.add(key);
     if (node instanceof MappingNode map) {
       for (NodeTuple t : map.getValue()) {
@@ -92,24 +94,6 @@ final class Key {
     return get(key).isPresent();
   }
 
-  /** Keys that are known here though nothing is taken from them now. */
-  void known(String... keys) {
-    asked.addAll(List.of(keys));
-  }
-
-  /** Names this mapping holds. */
-  List<Key> entries() {
-    List<Key> all = new ArrayList<>();
-    if (node instanceof MappingNode map) {
-      for (NodeTuple t : map.getValue()) {
-        if (t.getKeyNode() instanceof ScalarNode k) {
-          all.add(new Key(join(k.getValue()), t.getKeyNode(), faults));
-        }
-      }
-    }
-    return all;
-  }
-
   /** The elements of a list, or the value itself as a list of one. */
   List<Key> items() {
     List<Key> all = new ArrayList<>();
@@ -124,30 +108,50 @@ final class Key {
     return all;
   }
 
-  /** Says which keys are not known here; call when all known ones were asked for. */
+  /**
+   * Call when all that is wanted was asked for: says which keys are not known here, and which are
+   * known and not used.
+   */
   void close() {
+    Map<String, KeyCatalogue.Entry> known =
+        KeyCatalogue.at(path).map(KeyCatalogue.Entry::keys).orElse(Map.of());
     if (node instanceof MappingNode map) {
       for (NodeTuple t : map.getValue()) {
-        if (t.getKeyNode() instanceof ScalarNode k && !asked.contains(k.getValue())) {
-          Key at = new Key(join(k.getValue()), t.getKeyNode(), faults);
-          String near = nearest(k.getValue());
-          at.error(
-              "E5",
-              at.path() + " is not a known key.",
-              near.isEmpty()
-                  ? "Known here: " + String.join(", ", asked)
-                  : "Did you mean `" + near + "`?");
+        if (t.getKeyNode() instanceof ScalarNode k) {
+          String name = k.getValue();
+          KeyCatalogue.Entry entry = known.get(name);
+          if (entry == null) {
+            unknown(new Key(join(name), k, faults), name, known.keySet());
+          } else if (entry.use() == KeyCatalogue.Use.OPEN) {
+            faults.open(
+                "read-not-used",
+                join(name),
+                entry.says() + " Read, not yet used.",
+                "Have " + join(name) + " checked separately: nothing is calculated from it.");
+          } else if (entry.use() == KeyCatalogue.Use.NOTED || !asked.contains(name)) {
+            faults.note("read-not-used", join(name), entry.says() + " Read, not yet used.");
+          }
         }
       }
     } else if (!(node instanceof ScalarNode s && s.getValue().isEmpty())) {
-      error("shape", "keys are expected here, such as " + String.join(", ", asked), "");
+      error("shape", "keys are expected here, such as " + String.join(", ", known.keySet()), "");
     }
   }
 
-  private String nearest(String word) {
+  private static void unknown(Key at, String name, Set<String> known) {
+    String near = nearest(name, known);
+    at.error(
+        "E5",
+        "is not a known key.",
+        near.isEmpty()
+            ? "Known here: " + String.join(", ", known) + "."
+            : "Did you mean `" + near + "`?");
+  }
+
+  private static String nearest(String word, Set<String> known) {
     String best = "";
     int least = 1 + word.length() / 2;
-    for (String other : asked) {
+    for (String other : known) {
       int d = distance(word, other);
       if (d < least) {
         least = d;
@@ -202,7 +206,8 @@ final class Key {
     try {
       return Quantities.read(text(), dimension);
     } catch (Quantities.Unreadable wrong) {
-      error(wrong.id(), wrong.getMessage(), "");
+      boolean windForSpeed = wrong.id().equals("E6") && path.endsWith("rated.rotor-speed");
+      error(wrong.id(), wrong.getMessage(), windForSpeed ? "The wind goes to `rated.wind`." : "");
       return Double.NaN;
     }
   }
@@ -234,16 +239,16 @@ final class Key {
   }
 
   int integer(String key, int otherwise) {
-    Optional<Key> k = get(key);
-    if (k.isEmpty()) {
-      return otherwise;
+    return get(key).map(k -> k.wholeNumber(otherwise)).orElse(otherwise);
+  }
+
+  /** A whole number from nought up. */
+  int wholeNumber(int otherwise) {
+    if (text().matches("\\d{1,6}")) {
+      return Integer.parseInt(text());
     }
-    try {
-      return Integer.parseInt(k.get().text());
-    } catch (NumberFormatException e) {
-      k.get().error("number", "\"" + k.get().text() + "\" is not a whole number.", "");
-      return otherwise;
-    }
+    error("number", "\"" + text() + "\" is not a whole number.", "");
+    return otherwise;
   }
 
   boolean yes(String key, boolean otherwise) {
@@ -261,14 +266,39 @@ final class Key {
     };
   }
 
+  /** One of the words the catalogue lists for a key; blank when it is not there or not one. */
+  String choice(String key) {
+    Optional<Key> k = get(key);
+    if (k.isEmpty()) {
+      return "";
+    }
+    List<String> words =
+        KeyCatalogue.at(join(key)).map(KeyCatalogue.Entry::choices).orElse(List.of());
+    if (words.contains(k.get().text())) {
+      return k.get().text();
+    }
+    k.get()
+        .error(
+            "choice",
+            "\"" + k.get().text() + "\" is not known here.",
+            "Write " + String.join(" or ", words) + ".");
+    return "";
+  }
+
+  /** The same, with a word for when it is not there. */
+  String choice(String key, String otherwise) {
+    return has(key) ? choice(key) : otherwise;
+  }
+
   /** A bearing in radians: degrees or a letter such as NNE. */
   double bearing() {
-    List<String> letters =
-        List.of(
-            "N", "NNE", "NE", "ENE", "E", "ESE", "SE", "SSE", "S", "SSW", "SW", "WSW", "W", "WNW",
-            "NW", "NNW");
-    int i = letters.indexOf(text());
-    return i >= 0 ? i * Math.PI / 8 : si(Dimension.ANGLE);
+    int point = Compass.index(text());
+    return point >= 0 ? point * Math.PI / 8 : si(Dimension.ANGLE);
+  }
+
+  /** A value printed in the unit this one is typed in. */
+  String alike(double si, Dimension dimension) {
+    return Quantities.unitOf(text(), dimension).print(si);
   }
 
   /** Does something with a key when it is there. */

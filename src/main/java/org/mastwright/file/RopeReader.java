@@ -15,6 +15,9 @@ import org.mastwright.working.DefaultTaken.Side;
 final class RopeReader {
   private static final double NO_ROPE = 1e-3;
 
+  /** Breaking force of a strand over the sum of its wires; recalled. */
+  private static final double SPINNING_LOSS = 0.86;
+
   private final Key k;
   private final Faults faults;
 
@@ -24,22 +27,24 @@ final class RopeReader {
   }
 
   GuySet.Rope rope() {
-    Optional<Key> found = k.need("strand", "missing", "The strand is not given and never guessed.");
-    if (found.isEmpty()) {
-      return placeholder();
-    }
-    Key s = found.get();
+    return k.need("strand", "missing", "The strand is not given and never guessed.")
+        .map(RopeReader::rope)
+        .orElseGet(RopeReader::placeholder);
+  }
+
+  /** A rope of any line. */
+  static GuySet.Rope rope(Key s) {
     GuySet.Rope rope = s.has("diameter") ? asGiven(s) : fromTables(s);
     s.close();
     return rope;
   }
 
   /** Stands in after an error so that the rest of the file can still be read. */
-  private static GuySet.Rope placeholder() {
+  static GuySet.Rope placeholder() {
     return new GuySet.Rope("?", NO_ROPE, NO_ROPE, NO_ROPE, 0, NO_ROPE, NO_ROPE, "?");
   }
 
-  private GuySet.Rope asGiven(Key s) {
+  private static GuySet.Rope asGiven(Key s) {
     double d = s.required("diameter", Dimension.LENGTH, "The diameter is missing.");
     return new GuySet.Rope(
         Unit.MM.print(d) + " rope",
@@ -52,7 +57,7 @@ final class RopeReader {
         "as given");
   }
 
-  private GuySet.Rope fromTables(Key s) {
+  private static GuySet.Rope fromTables(Key s) {
     String nominal = s.text("nominal", "");
     String construction = s.text("construction", "");
     String grade = s.text("grade", "");
@@ -75,8 +80,9 @@ final class RopeReader {
     OptionalDouble stated = s.positive("breaking", Dimension.FORCE);
     OptionalDouble modulus = s.positive("modulus", Dimension.PRESSURE);
     if (modulus.isEmpty()) {
-      faults.taken(
-          s.path() + ".modulus", Unit.GPA.print(kind[1]) + " ±15 %", "recalled", Side.UNKNOWN);
+      s.faults()
+          .taken(
+              s.path() + ".modulus", Unit.GPA.print(kind[1]) + " ±15 %", "recalled", Side.UNKNOWN);
     }
     double area = kind[0] * Math.PI * d * d / 4;
     double mass = area * 7850 * 1.03;
@@ -106,8 +112,7 @@ final class RopeReader {
         breaking = OptionalDouble.of(lbf.get() * Unit.LBF.factor());
       }
     } else if (breaking.isEmpty() && grade.endsWith("MPa")) {
-      double strength = Double.parseDouble(grade.replace("MPa", "").trim()) * 1e6;
-      breaking = OptionalDouble.of(0.86 * strength * area);
+      breaking = OptionalDouble.of(SPINNING_LOSS * strength(s) * area);
     }
     if (breaking.isEmpty()) {
       s.error(
@@ -119,12 +124,19 @@ final class RopeReader {
     return new GuySet.Rope(
         nominal + " " + construction + " " + grade,
         d,
-        area,
+        s.positive("area", Dimension.AREA).orElse(area),
         modulus.orElse(kind[1]),
         modulus.isPresent() ? 0 : 0.15,
-        mass,
+        s.positive("mass", Dimension.MASS_PER_LENGTH).orElse(mass),
         breaking.getAsDouble(),
         source);
+  }
+
+  /** A grade that is the strength of the wires. */
+  private static double strength(Key s) {
+    Key grade = s.get("grade").orElseThrow();
+    double v = grade.si(Dimension.PRESSURE);
+    return v > 0 ? v : NO_ROPE;
   }
 
   GuySet.EndFitting ends() {
@@ -171,9 +183,7 @@ final class RopeReader {
                   faults.warning(
                       "E15",
                       h,
-                      "A working load of "
-                          + Unit.KN.print(piece.workingLoad_N().getAsDouble())
-                          + " has no `safety`.",
+                      "A working load of " + h.text("working-load", "") + " has no `safety`.",
                       "Write the maker's factor (often 5 for forged gear), or the breaking load."
                           + " Without it the hardware is not assessed.");
                 }
@@ -202,6 +212,9 @@ final class RopeReader {
         pulse.get().close();
         return p;
       }
+      if (sag.isEmpty()) {
+        t.error("missing", "A tension is a force, a share, snug, {sag} or {pulse}.", "");
+      }
       return new GuySet.Tension.Sag(sag.orElse(Double.NaN));
     }
     if (t.text().equals("snug")) {
@@ -223,7 +236,10 @@ final class RopeReader {
       values.add(v.si(Dimension.FORCE));
     }
     if (values.size() != 1 && values.size() != guys) {
-      t.error("E13", "has " + values.size() + " values but there are " + guys + " guys.", "");
+      t.error(
+          "E13",
+          "has " + values.size() + " values but there are " + guys + " guys in this set.",
+          "Give one value or " + Plain.number(guys) + ".");
       return new GuySet.Tension.Snug();
     }
     return new GuySet.Tension.Force(values);

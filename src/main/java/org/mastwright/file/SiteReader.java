@@ -5,20 +5,21 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
-import org.mastwright.design.Basis;
 import org.mastwright.design.Site;
 import org.mastwright.design.SiteWind;
 import org.mastwright.units.Dimension;
 import org.mastwright.units.Unit;
 import org.mastwright.working.DefaultTaken.Side;
 
-/** Wind, ice, temperature of the site; soil and earthquake are read and not used. */
+/** Wind, ice, temperature, ground and earthquake of the site. */
 final class SiteReader {
   private final Key site;
+  private final double declination_rad;
   private final Faults faults;
 
-  SiteReader(Key site, Optional<Basis> basis) {
+  SiteReader(Key site, double declination_rad) {
     this.site = site;
+    this.declination_rad = declination_rad;
     this.faults = site.faults();
   }
 
@@ -27,21 +28,8 @@ final class SiteReader {
     SiteWind w = wind.map(this::wind).orElse(null);
     Site.Ice ice = site.get("ice").map(this::ice).orElseGet(this::noIceStated);
     Site.Temperature t = temperature();
-    site.get("soil")
-        .ifPresent(
-            k ->
-                faults.note(
-                    "read-not-used",
-                    "site.soil",
-                    "Soil: read, not yet used; anchors and footing are listed as not checked."));
-    site.get("seismic")
-        .ifPresent(
-            k ->
-                faults.open(
-                    "read-not-used",
-                    "site.seismic",
-                    "An earthquake is stated and not calculated by this version.",
-                    "Have it checked by the building code of the place."));
+    Optional<Site.Soil> soil = site.get("soil").map(SoilReader::soil);
+    Optional<Site.Seismic> seismic = site.get("seismic").map(SoilReader::seismic);
     Site all =
         new Site(
             site.value("altitude", Dimension.LENGTH),
@@ -49,8 +37,8 @@ final class SiteReader {
             w,
             ice,
             t,
-            Optional.empty(),
-            Optional.empty());
+            soil,
+            seismic);
     site.close();
     return all;
   }
@@ -70,18 +58,57 @@ final class SiteReader {
       k.close();
       return new Site.Ice.None();
     }
-    k.known("kind", "with-wind", "one-sided");
+    Optional<Site.Ice.WithWind> wind = k.get("with-wind").flatMap(SiteReader::withWind);
+    double oneSided = k.value("one-sided", Dimension.ONE).orElse(0);
+    String kind = k.choice("kind", "glaze");
     Site.Ice ice;
     if (k.has("class")) {
-      ice = new Site.Ice.IsoClass(k.text("class", ""), Optional.empty(), 0);
+      if (k.has("thickness")) {
+        k.error("choice", "Both a class and a thickness are given.", "Keep one of the two.");
+      }
+      ice = new Site.Ice.IsoClass(k.choice("class"), wind, oneSided);
     } else {
       double t = k.required("thickness", Dimension.LENGTH, "How thick is the ice?");
-      Site.Ice.Kind kind =
-          k.text("kind", "glaze").equals("rime") ? Site.Ice.Kind.RIME : Site.Ice.Kind.GLAZE;
-      ice = new Site.Ice.Thickness(kind, t, Optional.empty(), 0);
+      ice =
+          new Site.Ice.Thickness(
+              kind.equals("rime") ? Site.Ice.Kind.RIME : Site.Ice.Kind.GLAZE, t, wind, oneSided);
     }
     k.close();
     return ice;
+  }
+
+  private static Optional<Site.Ice.WithWind> withWind(Key w) {
+    OptionalDouble speed = w.positive("speed", Dimension.SPEED);
+    OptionalDouble pressure = w.positive("pressure-factor", Dimension.ONE);
+    OptionalDouble factor = w.positive("speed-factor", Dimension.ONE);
+    int given =
+        (speed.isPresent() ? 1 : 0) + (pressure.isPresent() ? 1 : 0) + (factor.isPresent() ? 1 : 0);
+    if (given != 1) {
+      w.error("choice", "Give `speed`, `pressure-factor` or `speed-factor`, one of them.", "");
+    }
+    Optional<SiteWind.Averaging> averaging = Optional.empty();
+    if (speed.isPresent()) {
+      w.need("averaging", "missing", "Over what time is the speed averaged?");
+      averaging = averaging(w);
+    }
+    w.close();
+    if (pressure.isPresent()) {
+      return Optional.of(new Site.Ice.WithWind.PressureFactor(pressure.getAsDouble()));
+    }
+    if (factor.isPresent()) {
+      return Optional.of(new Site.Ice.WithWind.SpeedFactor(factor.getAsDouble()));
+    }
+    return averaging.map(a -> new Site.Ice.WithWind.Speed(speed.orElse(Double.NaN), a));
+  }
+
+  private static Optional<SiteWind.Averaging> averaging(Key k) {
+    String word = k.choice("averaging");
+    for (SiteWind.Averaging x : SiteWind.Averaging.values()) {
+      if (x.key().equals(word)) {
+        return Optional.of(x);
+      }
+    }
+    return Optional.empty();
   }
 
   private Site.Temperature temperature() {
@@ -109,7 +136,7 @@ final class SiteReader {
     if (reference.isPresent() && named.isPresent()) {
       w.error(
           "E4",
-          "Both `class: " + named.get().text() + "` and a reference speed are given.",
+          bothGiven(named.get(), reference.get()),
           "Keep the one that describes your site; the machine's own class goes to"
               + " `turbine.certified-class`.");
     } else if (named.isPresent()) {
@@ -130,7 +157,7 @@ final class SiteReader {
                   k.close();
                   return m;
                 });
-    String terrain = w.text("terrain", "");
+    String terrain = w.choice("terrain");
     if (terrain.isEmpty()) {
       faults.taken("site.wind.terrain", "open country", "practice", Side.UNKNOWN);
     }
@@ -148,8 +175,23 @@ final class SiteReader {
     return new SiteWind(stated, mean, terrain, land);
   }
 
+  private static final Map<String, Double> CLASS_MPS =
+      Map.of("I", 50.0, "II", 42.5, "III", 37.5, "IV", 30.0);
+
+  private static String bothGiven(Key named, Key reference) {
+    Double own = CLASS_MPS.get(named.text());
+    String speed = reference.isMap() ? reference.text("speed", "") : "";
+    return "Both `class: "
+        + named.text()
+        + "`"
+        + (own == null ? "" : " (Vref " + Unit.MPS.print(own) + ")")
+        + " and a reference speed"
+        + (speed.isEmpty() ? "" : " (" + speed + ")")
+        + " are given.";
+  }
+
   private static SiteWind.Stated iecClass(Key k) {
-    Map<String, Double> speeds = Map.of("I", 50.0, "II", 42.5, "III", 37.5, "IV", 30.0);
+    Map<String, Double> speeds = CLASS_MPS;
     if (!speeds.containsKey(k.text())) {
       k.error("choice", "The classes are I, II, III and IV.", "");
       return null;
@@ -159,38 +201,19 @@ final class SiteReader {
 
   private SiteWind.Stated reference(Key r) {
     double speed = r.required("speed", Dimension.SPEED, "The wind speed is never guessed.");
-    SiteWind.Averaging averaging = null;
-    Optional<Key> a =
-        r.need(
-            "averaging", "missing", "Over what time is the speed averaged? It is never guessed.");
-    if (a.isPresent()) {
-      for (SiteWind.Averaging x : SiteWind.Averaging.values()) {
-        averaging = x.key().equals(a.get().text()) ? x : averaging;
-      }
-      if (averaging == null) {
-        a.get()
-            .error(
-                "choice",
-                "\"" + a.get().text() + "\" is no averaging time known here.",
-                "Write 3 s, 1 min, 10 min, 1 h or fastest-mile.");
-      }
-    }
+    r.need("averaging", "missing", "Over what time is the speed averaged? It is never guessed.");
+    Optional<SiteWind.Averaging> averaging = averaging(r);
     SiteWind.Level level = level(r);
-    r.known("risk-category");
     if (!r.has("height")) {
       faults.taken("site.wind.reference.height", "10 m", "basis", Side.NEUTRAL);
     }
+    double height = r.positive("height", Dimension.LENGTH).orElse(10);
+    String terrain = r.text("terrain", "open");
+    String source = r.text("source", "");
     SiteWind.Stated stated =
-        averaging == null || level == null
+        averaging.isEmpty() || level == null
             ? null
-            : new SiteWind.Stated.Speed(
-                speed,
-                averaging,
-                level,
-                r.positive("height", Dimension.LENGTH).orElse(10),
-                r.text("terrain", "open"),
-                r.text("source", ""));
-    r.known("height", "terrain", "source");
+            : new SiteWind.Stated.Speed(speed, averaging.get(), level, height, terrain, source);
     r.close();
     return stated;
   }
@@ -198,6 +221,7 @@ final class SiteReader {
   private static SiteWind.Level level(Key r) {
     Optional<Key> level = r.get("level");
     OptionalDouble period = r.positive("return-period", Dimension.TIME);
+    String category = r.choice("risk-category");
     if (level.isPresent() == period.isPresent()) {
       r.error(
           "E2",
@@ -207,7 +231,7 @@ final class SiteReader {
                   + " pressure.",
           level.isPresent()
               ? "Keep one."
-              : "Add `level: ultimate` (a map of ultimate speeds) or `level: nominal` (older maps,"
+              : "Add `level: ultimate` (the map of asce-7-16) or `level: nominal` (older maps,"
                   + " 50 years).");
       return null;
     }
@@ -222,7 +246,6 @@ final class SiteReader {
       return null;
     }
     Map<String, Double> years = Map.of("I", 300.0, "II", 700.0, "III", 1700.0, "IV", 3000.0);
-    String category = r.text("risk-category", "");
     if (!years.containsKey(category)) {
       r.error(
           "choice",
@@ -245,17 +268,24 @@ final class SiteReader {
       for (Key s : k.items()) {
         sectors.add(
             new SiteWind.Topography.Sector(
-                s.get("from").map(Key::bearing).orElse(0.0),
-                s.get("to").map(Key::bearing).orElse(0.0),
+                sectorEnd(s, "from"),
+                sectorEnd(s, "to"),
                 s.positive("speed-factor", Dimension.ONE),
                 s.positive("pressure-factor", Dimension.ONE)));
+        if (s.has("speed-factor") == s.has("pressure-factor")) {
+          s.error("choice", "Give `speed-factor` or `pressure-factor`, one of them.", "");
+        }
         s.close();
       }
       return new SiteWind.Topography.BySector(sectors);
     }
     OptionalDouble speed = k.positive("speed-factor", Dimension.ONE);
     OptionalDouble pressure = k.positive("pressure-factor", Dimension.ONE);
-    k.known("hill");
+    Optional<SiteWind.Topography> hill = k.get("hill").map(this::hill);
+    if ((speed.isPresent() ? 1 : 0) + (pressure.isPresent() ? 1 : 0) + (hill.isPresent() ? 1 : 0)
+        != 1) {
+      k.error("choice", "Give `speed-factor`, `pressure-factor` or `hill`, one of them.", "");
+    }
     k.close();
     if (speed.isPresent()) {
       return new SiteWind.Topography.SpeedFactor(speed.getAsDouble());
@@ -263,11 +293,29 @@ final class SiteReader {
     if (pressure.isPresent()) {
       return new SiteWind.Topography.PressureFactor(pressure.getAsDouble());
     }
+    return hill.orElseGet(SiteWind.Topography.NotStated::new);
+  }
+
+  private double sectorEnd(Key s, String key) {
+    return s.need(key, "missing", "A sector goes `from` one bearing clockwise `to` another.")
+        .map(b -> b.bearing() + declination_rad)
+        .orElse(0.0);
+  }
+
+  private SiteWind.Topography hill(Key h) {
+    SiteWind.Topography hill =
+        new SiteWind.Topography.Hill(
+            h.choice("kind"),
+            h.required("height", Dimension.LENGTH, "How high is the hill?"),
+            h.required("half-length", Dimension.LENGTH, "How long is its slope?"),
+            h.value("upwind-distance", Dimension.LENGTH).orElse(0));
+    h.close();
     faults.open(
         "hill-not-calculated",
-        "site.wind.topographic",
-        "A hill is described; its speed-up is not calculated by this version, and nothing is added.",
+        "site.wind.topographic.hill",
+        "A hill is described; its speed-up is not calculated by this version, and nothing is"
+            + " added.",
         "Give speed-factor or pressure-factor from the code of the place.");
-    return new SiteWind.Topography.NotStated();
+    return hill;
   }
 }

@@ -1,6 +1,7 @@
 package org.mastwright.file;
 
 import java.nio.charset.StandardCharsets;
+import java.nio.file.Path;
 import java.security.MessageDigest;
 import java.security.NoSuchAlgorithmException;
 import java.util.ArrayList;
@@ -29,9 +30,14 @@ public final class TowerFiles {
 
   private TowerFiles() {}
 
-  /** Reads the bytes of a file. */
+  /** Reads the bytes of a file that lies nowhere: tables beside it cannot be read. */
   public static Reading read(String name, byte[] content) {
-    Faults faults = new Faults();
+    return read(name, content, Optional.empty());
+  }
+
+  /** Reads the bytes of a file; {@code folder} is where tables beside it may lie. */
+  public static Reading read(String name, byte[] content, Optional<Path> folder) {
+    Faults faults = new Faults(folder);
     Optional<Design> design = Optional.empty();
     Optional<Node> root = compose(content, faults);
     if (root.isPresent()) {

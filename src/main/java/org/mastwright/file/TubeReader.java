@@ -6,6 +6,7 @@ import java.util.OptionalDouble;
 import org.mastwright.design.Section;
 import org.mastwright.design.Tube;
 import org.mastwright.units.Dimension;
+import org.mastwright.units.Numbers;
 import org.mastwright.units.Unit;
 import org.mastwright.working.DefaultTaken.Side;
 
@@ -24,19 +25,11 @@ final class TubeReader {
 
   Optional<Tube> read(double bottom_m) {
     double length = k.required("length", Dimension.LENGTH, "How long is it?");
-    k.known("openings", "wall-is", "measured", "corrosion", "shape", "across");
     Optional<Key> pipe = k.get("pipe");
-    Optional<Tube> tube =
-        pipe.isPresent() ? fromPipe(pipe.get(), bottom_m, length) : fromSizes(bottom_m, length);
-    if (k.has("openings")) {
-      faults.open(
-          "read-not-used",
-          k.path() + ".openings",
-          "An opening in the tube: read, not yet used.",
-          "Have the section at the opening checked.");
+    if (pipe.isPresent() && (k.has("outside") || k.has("wall"))) {
+      k.error("choice", "Both a pipe and an outside or wall are given.", "Keep one of the two.");
     }
-    k.close();
-    return tube;
+    return pipe.isPresent() ? fromPipe(pipe.get(), bottom_m, length) : fromSizes(bottom_m, length);
   }
 
   private Optional<Tube.Steel> steel(double wall) {
@@ -87,18 +80,54 @@ final class TubeReader {
   }
 
   private Optional<Tube> fromPipe(Key pipe, double bottom_m, double length) {
-    String nominal = pipe.text("nominal", "");
-    String schedule = pipe.text("schedule", "");
-    if (pipe.has("dn")) {
-      pipe.known("series");
-      pipe.close();
+    Optional<Tube> tube =
+        pipe.has("dn") ? fromDn(pipe, bottom_m, length) : fromSchedule(pipe, bottom_m, length);
+    pipe.close();
+    return tube;
+  }
+
+  /** Threaded pipe to EN 10255 by its nominal diameter. */
+  private Optional<Tube> fromDn(Key pipe, double bottom_m, double length) {
+    String dn = pipe.text("dn", "");
+    String series = pipe.choice("series", "medium");
+    if (pipe.has("nominal") || pipe.has("schedule")) {
+      pipe.error("choice", "Both dn and nominal are given.", "Keep one of the two.");
+    }
+    Optional<Map<String, String>> row =
+        Tables.rows("en10255.csv").stream().filter(r -> r.get("dn").equals(dn)).findFirst();
+    if (row.isEmpty() || series.isEmpty()) {
       pipe.error(
           "choice",
-          "DN pipes are not in the tables of this version.",
+          "Pipe DN " + dn + " is not in the table.",
           "Write outside and wall as measured.");
       return Optional.empty();
     }
-    pipe.close();
+    double outside = Double.parseDouble(row.get().get("outside")) / 1000;
+    double wall = Double.parseDouble(row.get().get(series)) / 1000;
+    if (!(wall > corrosion())) {
+      k.get("corrosion").orElse(k).error("range", "leaves no wall.", "");
+      return Optional.empty();
+    }
+    Section full = new Section(outside, wall, 0);
+    Section left = new Section(outside, wall - corrosion(), 0);
+    return steel(wall)
+        .map(
+            s ->
+                new Tube(
+                    "DN " + dn + " " + series + " pipe",
+                    bottom_m,
+                    bottom_m + length,
+                    left,
+                    left,
+                    s,
+                    Tube.Making.UNKNOWN,
+                    full.area_m2() * s.density_kgpm3(),
+                    "EN 10255 Table 2 (recalled)"));
+  }
+
+  private Optional<Tube> fromSchedule(Key pipe, double bottom_m, double length) {
+    String nominal = pipe.text("nominal", "");
+    String schedule = pipe.text("schedule", "");
     Optional<Map<String, String>> row = Tables.pipe(nominal, schedule);
     if (row.isEmpty()) {
       pipe.error(
@@ -110,9 +139,9 @@ final class TubeReader {
     double outside = Double.parseDouble(row.get().get("OD")) * 0.0254;
     double wall = Double.parseDouble(row.get().get("tnom")) * 0.0254;
     double nominalMass = Double.parseDouble(row.get().get("W")) * 0.45359237 / 0.3048;
-    boolean nominalWall = !k.text("wall-is", "").isEmpty();
-    double strong = nominalWall ? wall : wall * WELDED_PIPE_FACTOR;
-    if (!nominalWall) {
+    boolean nominalWall = k.choice("wall-is", "nominal").equals("nominal");
+    double strong = nominalWall ? wall * WELDED_PIPE_FACTOR : wall;
+    if (nominalWall) {
       faults.taken(
           k.path() + ".wall-is",
           "nominal x 0.93 (" + Unit.MM.print(strong) + ")",
@@ -120,6 +149,10 @@ final class TubeReader {
           Side.SAFE);
     }
     double left = strong - corrosion();
+    if (!(left > 0)) {
+      k.get("corrosion").orElse(k).error("range", "leaves no wall.", "");
+      return Optional.empty();
+    }
     Section section = new Section(outside, left, 0);
     return steel(wall)
         .map(
@@ -137,6 +170,8 @@ final class TubeReader {
   }
 
   private Optional<Tube> fromSizes(double bottom_m, double length) {
+    k.choice("wall-is");
+    k.yes("measured", false);
     double[] outside = ends("outside");
     double[] wall = ends("wall");
     if (Double.isNaN(outside[0] + outside[1] + wall[0] + wall[1])) {
@@ -144,8 +179,7 @@ final class TubeReader {
     }
     k.get("outside").filter(Key::isScalar).ifPresent(o -> tradeSize(o, outside[0]));
     int sides = sides();
-    double flat =
-        sides > 0 && k.text("across", "").equals("corners") ? Math.cos(Math.PI / sides) : 1;
+    double flat = sides > 0 && k.choice("across").equals("corners") ? Math.cos(Math.PI / sides) : 1;
     double left0 = wall[0] - corrosion();
     double left1 = wall[1] - corrosion();
     if (!(left0 > 0)
@@ -195,35 +229,30 @@ final class TubeReader {
         && !k.yes("measured", false)) {
       o.error(
           "E8",
-          o.text() + " is the trade size of pipe that measures " + real.get() + " in.",
+          o.text()
+              + " is the trade size of pipe that measures "
+              + Numbers.fixed(real.get(), 3)
+              + " in.",
           "Write `pipe: {nominal: "
               + o.text()
-              + ", schedule: 40}`; or, if you measured it, add"
-              + " `measured: true`.");
+              + ", schedule: 40}`; or, if you measured "
+              + Numbers.fixed(inches, 2)
+              + " in across, add `measured: true`.");
     }
   }
 
   private int sides() {
-    String shape = k.text("shape", "round");
-    if (shape.equals("round")) {
+    String shape = k.choice("shape", "round");
+    if (!shape.startsWith("polygon-")) {
       return 0;
     }
-    int sides =
-        switch (shape) {
-          case "polygon-8" -> 8;
-          case "polygon-12" -> 12;
-          case "polygon-16" -> 16;
-          case "polygon-18" -> 18;
-          default -> -1;
-        };
-    if (sides < 0) {
-      k.error("choice", "\"" + shape + "\" is no shape known here.", "");
-      return 0;
-    }
+    int sides = Integer.parseInt(shape.substring("polygon-".length()));
     if (!k.has("across")) {
-      k.error(
+      Key outside = k.get("outside").orElse(k);
+      String size = outside.isScalar() ? " of " + outside.text() : "";
+      outside.error(
           "E16",
-          "A " + sides + "-sided tube: across flats or corners?",
+          "A " + sides + "-sided tube" + size + ": across flats or corners?",
           "Add `across: flats` or `across: corners`.");
     }
     return sides;

@@ -5,7 +5,6 @@ import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import org.mastwright.design.Rotor;
-import org.mastwright.design.Site;
 import org.mastwright.design.Turbine;
 import org.mastwright.units.Dimension;
 import org.mastwright.units.Unit;
@@ -16,7 +15,7 @@ final class TurbineReader {
   private final Key t;
   private final Faults faults;
 
-  TurbineReader(Key t, Optional<Site> site) {
+  TurbineReader(Key t) {
     this.t = t;
     this.faults = t.faults();
   }
@@ -34,16 +33,16 @@ final class TurbineReader {
   }
 
   Turbine read() {
-    double mass = t.required("mass", Dimension.MASS, "The mass on the tower is never guessed.");
     Optional<Key> rotorKey = t.need("rotor", "missing", "The rotor is not described.");
     Optional<Key> ratedKey = t.need("rated", "missing", "The rated point is not given.");
     Optional<Key> headKey = t.need("head", "missing", "The head is not described.");
+    Optional<Turbine.Tail> tail = t.get("tail").map(this::tail);
     if (rotorKey.isEmpty() || ratedKey.isEmpty() || headKey.isEmpty()) {
       return null;
     }
+    double mass = mass(rotorKey.get(), headKey.get(), tail);
     Turbine.Rated rated = rated(ratedKey.get());
-    Rotor rotor = rotor(rotorKey.get(), rated, mass);
-    Optional<Turbine.Tail> tail = t.get("tail").map(this::tail);
+    Rotor rotor = new RotorReader(rotorKey.get(), t.get("upright"), rated, mass).read();
     Turbine.Head head = head(headKey.get(), rotor, mass, tail);
     Turbine.RotorSpeed speed = rotorSpeed(rated);
     OptionalDouble cutIn = OptionalDouble.empty();
@@ -60,7 +59,7 @@ final class TurbineReader {
         new Turbine(
             t.text("source", ""),
             t.text("certified-class", ""),
-            t.value("survival-wind", Dimension.SPEED),
+            t.positive("survival-wind", Dimension.SPEED),
             mass,
             rotor,
             head,
@@ -72,21 +71,67 @@ final class TurbineReader {
             design(rated),
             yaw(),
             t.positive("brake-torque", Dimension.MOMENT),
-            t.value("short-circuit-factor", Dimension.ONE).orElse(2),
+            t.positive("short-circuit-factor", Dimension.ONE).orElse(2),
             control,
             furl,
             parked(),
-            16,
+            imbalanceGrade() * 1e-3,
             thrust(),
             orders(),
             t.value("margin", Dimension.ONE).orElse(0.10));
-    t.known("imbalance-grade", "upright");
     t.close();
     return all;
   }
 
+  /** The whole, or the sum of rotor, head and tail; never guessed. */
+  private double mass(Key rotor, Key head, Optional<Turbine.Tail> tail) {
+    OptionalDouble whole = t.positive("mass", Dimension.MASS);
+    OptionalDouble r = rotor.positive("mass", Dimension.MASS);
+    OptionalDouble h = head.positive("mass", Dimension.MASS);
+    double rest = tail.map(Turbine.Tail::mass_kg).orElse(0.0);
+    if (whole.isEmpty() && (r.isEmpty() || h.isEmpty())) {
+      t.error(
+          "missing",
+          "The mass on the tower is never guessed.",
+          "Add `mass:`, or `rotor.mass` and `head.mass`.");
+      return Double.NaN;
+    }
+    double sum = r.orElse(0) + h.orElse(0) + rest;
+    if (whole.isPresent() && r.isPresent() && h.isPresent()) {
+      if (Math.abs(sum - whole.getAsDouble()) > 0.02 * whole.getAsDouble()) {
+        t.get("mass")
+            .orElseThrow()
+            .error(
+                "mass",
+                "Rotor, head and tail together have "
+                    + t.get("mass").orElseThrow().alike(sum, Dimension.MASS)
+                    + ", not "
+                    + t.text("mass", "")
+                    + ".",
+                "Leave one of the masses out, or correct it.");
+      }
+    } else if (whole.isPresent() && sum >= whole.getAsDouble()) {
+      t.get("mass").orElseThrow().error("mass", "is not more than its parts.", "");
+    }
+    return whole.orElse(sum);
+  }
+
+  private double imbalanceGrade() {
+    Optional<Key> k = t.get("imbalance-grade");
+    if (k.isEmpty()) {
+      return 16;
+    }
+    if (!k.get().text().matches("G\\d{1,4}(\\.\\d+)?")) {
+      k.get()
+          .error(
+              "choice", "\"" + k.get().text() + "\" is no balance grade.", "Write G16, as mm/s.");
+      return 16;
+    }
+    return Double.parseDouble(k.get().text().substring(1));
+  }
+
   private Turbine.Rated rated(Key k) {
-    boolean electrical = k.text("power-is", "electrical").equals("electrical");
+    boolean electrical = k.choice("power-is", "electrical").equals("electrical");
     Turbine.Rated r =
         new Turbine.Rated(
             k.required("power", Dimension.POWER, "The rated power is missing."),
@@ -97,91 +142,8 @@ final class TurbineReader {
     return r;
   }
 
-  private Rotor rotor(Key k, Turbine.Rated rated, double mass) {
-    Rotor.Kind kind = Rotor.Kind.PROPELLER;
-    boolean known = false;
-    for (Rotor.Kind x : Rotor.Kind.values()) {
-      if (x.key().equals(k.text("kind", ""))) {
-        kind = x;
-        known = true;
-      }
-    }
-    if (!known) {
-      k.error(
-          "choice",
-          "rotor.kind is propeller, multi-blade, four-sail, savonius, darrieus or"
-              + " straight-bladed.",
-          "");
-    } else if (kind.isUpright()) {
-      k.error(
-          "rotor-not-built",
-          "Upright rotors are not calculated by this version.",
-          "No load model for them is built yet.");
-    }
-    int blades = k.integer("blades", 3);
-    double d = k.required("diameter", Dimension.LENGTH, "The rotor diameter is missing.");
-    double area = bladeArea(k, d, blades);
-    OptionalDouble ownMass = k.positive("mass", Dimension.MASS);
-    if (ownMass.isEmpty()) {
-      taken("rotor.mass", "25 % of the whole, 15 to 40 %", Side.UNKNOWN);
-    }
-    double m = ownMass.orElse(0.25 * mass);
-    double ratio =
-        k.positive("tip-speed-ratio", Dimension.ONE)
-            .orElse(rated.omega_radps() * d / 2 / rated.wind_mps());
-    if (!k.has("tip-speed-ratio")) {
-      taken(
-          "rotor.tip-speed-ratio", Unit.ONE.print(ratio) + ", from the rated point", Side.UNKNOWN);
-    }
-    for (String later : List.of("sections", "blade", "shaft")) {
-      if (k.has(later)) {
-        faults.note("read-not-used", k.path() + "." + later, "Read, not yet used.");
-      }
-    }
-    k.known("hub-radius", "pitch", "balance");
-    Rotor rotor =
-        new Rotor(
-            kind,
-            blades,
-            d,
-            area,
-            m,
-            new Rotor.MassBand(
-                ownMass.isPresent() ? m : 0.15 * mass, ownMass.isPresent() ? m : 0.40 * mass),
-            k.text("position", "upwind").equals("downwind")
-                ? Rotor.Position.DOWNWIND
-                : Rotor.Position.UPWIND,
-            given(k, "overhang", Dimension.LENGTH, 0.12 * d, Unit.M, Side.UNKNOWN),
-            given(k, "tilt", Dimension.ANGLE, 0, Unit.DEG, Side.UNKNOWN),
-            k.value("cone", Dimension.ANGLE).orElse(0),
-            0,
-            ratio,
-            0,
-            !k.text("spin", "clockwise").equals("anticlockwise"),
-            new Rotor.Blade(m / blades, 0.35 * d / 2, m / blades * d * d / 4 / 6, false),
-            new Rotor.Shaft(0.1 * d, 0.12 * d),
-            false,
-            List.of(),
-            Optional.empty());
-    k.close();
-    return rotor;
-  }
-
-  private double bladeArea(Key k, double d, int blades) {
-    OptionalDouble stated = k.positive("area-per-blade", Dimension.AREA);
-    OptionalDouble solidity = k.positive("solidity", Dimension.ONE);
-    if (stated.isPresent()) {
-      return stated.getAsDouble();
-    }
-    if (solidity.isEmpty()) {
-      taken("rotor.area-per-blade", "12 % solidity", Side.SAFE);
-    }
-    return solidity.orElse(0.12) * Math.PI * d * d / 4 / blades;
-  }
-
   private Turbine.Head head(Key k, Rotor rotor, double mass, Optional<Turbine.Tail> tail) {
-    double hub =
-        k.required("hub-above-top", Dimension.LENGTH, "The height of the hub is never guessed.");
+    double hub = hub(k, rotor);
     double tailArea = tail.map(Turbine.Tail::area_m2).orElse(0.0);
     double side =
         given(
@@ -217,6 +179,22 @@ final class TurbineReader {
             .orElse(mass - rotor.mass_kg() - tail.map(Turbine.Tail::mass_kg).orElse(0.0));
     k.close();
     return new Turbine.Head(own, hub, up, ahead, side, axis, across);
+  }
+
+  private static double hub(Key k, Rotor rotor) {
+    if (rotor.kind().isUpright()) {
+      k.get("hub-above-top")
+          .ifPresent(
+              at ->
+                  RotorReader.notUpright(
+                      at,
+                      rotor.kind(),
+                      "no hub height",
+                      "Write `upright.rotor-bottom-above-top`: from the mast top up to the lower"
+                          + " end of the blades."));
+      return rotor.upright().map(u -> u.bottomAboveTop_m() + u.height_m() / 2).orElse(1.0);
+    }
+    return k.required("hub-above-top", Dimension.LENGTH, "The height of the hub is never guessed.");
   }
 
   private Turbine.Tail tail(Key k) {
@@ -318,13 +296,13 @@ final class TurbineReader {
     }
     Turbine.Yaw yaw =
         new Turbine.Yaw(
-            k.get().text("kind", "passive"), k.get().positive("rate", Dimension.ROTATION_SPEED));
+            k.get().choice("kind", "passive"), k.get().positive("rate", Dimension.ROTATION_SPEED));
     k.get().close();
     return yaw;
   }
 
   private Turbine.Control control() {
-    String word = t.text("control", "none");
+    String word = t.choice("control", "none");
     if (!t.has("control")) {
       taken("control", "none", Side.SAFE);
     }
@@ -333,10 +311,6 @@ final class TurbineReader {
         return c;
       }
     }
-    t.error(
-        "choice",
-        "turbine.control is fixed-speed-stall, furling, pitch-to-feather, brake-only" + " or none.",
-        "");
     return Turbine.Control.NONE;
   }
 
@@ -344,31 +318,37 @@ final class TurbineReader {
     if (!t.has("parked")) {
       taken("parked", "both, the worse counts", Side.SAFE);
     }
-    return switch (t.text("parked", "both")) {
+    return switch (t.choice("parked")) {
       case "stopped" -> Turbine.Parked.STOPPED;
       case "spinning" -> Turbine.Parked.SPINNING;
-      case "both" -> Turbine.Parked.BOTH;
-      default -> {
-        t.error("choice", "turbine.parked is stopped or spinning.", "");
-        yield Turbine.Parked.BOTH;
-      }
+      default -> Turbine.Parked.BOTH;
     };
   }
 
   private Optional<Turbine.StatedThrust> thrust() {
-    return t.get("thrust")
-        .map(
-            k -> {
-              Turbine.StatedThrust s =
-                  new Turbine.StatedThrust(
-                      k.text("source", "maker"),
-                      List.of(
-                          new Turbine.StatedThrust.Point(
-                              k.value("at", Dimension.SPEED).orElse(0),
-                              k.required("greatest", Dimension.FORCE, "How great?"))));
-              k.close();
-              return s;
-            });
+    Optional<Key> k = t.get("thrust");
+    if (k.isEmpty()) {
+      return Optional.empty();
+    }
+    if (k.get().isScalar()) {
+      List<double[]> rows =
+          DataTable.read(k.get(), faults.folder, List.of("wind_mps", "thrust_N"), List.of());
+      return rows.isEmpty()
+          ? Optional.empty()
+          : Optional.of(
+              new Turbine.StatedThrust(
+                  k.get().text(),
+                  rows.stream().map(r -> new Turbine.StatedThrust.Point(r[0], r[1])).toList()));
+    }
+    Turbine.StatedThrust stated =
+        new Turbine.StatedThrust(
+            k.get().text("source", "maker"),
+            List.of(
+                new Turbine.StatedThrust.Point(
+                    k.get().value("at", Dimension.SPEED).orElse(0),
+                    k.get().required("greatest", Dimension.FORCE, "How great?"))));
+    k.get().close();
+    return Optional.of(stated);
   }
 
   private List<Integer> orders() {
@@ -377,11 +357,11 @@ final class TurbineReader {
         .ifPresent(
             list -> {
               for (Key k : list.items()) {
-                try {
-                  all.add(Integer.parseInt(k.text()));
-                } catch (NumberFormatException e) {
-                  k.error("number", "an order is a whole number.", "");
+                int order = k.wholeNumber(1);
+                if (order < 1) {
+                  k.error("range", "an order is 1 or more.", "");
                 }
+                all.add(order);
               }
             });
     return all;

@@ -98,6 +98,7 @@ final class GivenTables {
     joint.lengths().entrySet().stream()
         .sorted(java.util.Map.Entry.comparingByKey())
         .forEach(e -> parts.add(e.getKey() + " " + print.of(e.getValue(), Unit.MM)));
+    joint.preload_N().ifPresent(preload -> parts.add("preload " + print.of(preload, Unit.KN)));
     joint.words().entrySet().stream()
         .sorted(java.util.Map.Entry.comparingByKey())
         .forEach(e -> parts.add(e.getKey() + " " + e.getValue()));

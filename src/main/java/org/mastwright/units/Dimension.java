@@ -10,6 +10,7 @@ public enum Dimension {
   MASS,
   MASS_PER_LENGTH,
   DENSITY,
+  WEIGHT_PER_VOLUME,
   MASS_INERTIA,
   FORCE,
   FORCE_PER_LENGTH,

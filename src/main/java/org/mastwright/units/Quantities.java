@@ -1,5 +1,6 @@
 package org.mastwright.units;
 
+import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Locale;
@@ -70,6 +71,8 @@ public final class Quantities {
     add(m, Unit.LBPFT, "lb/ft");
     add(m, Unit.KGPM3, "kg/m^3", "kg/m3");
     add(m, Unit.PCF, "pcf");
+    add(m, Unit.KNPM3, "kN/m^3", "kN/m3");
+    add(m, Unit.PCF_WEIGHT, "pcf");
     add(m, Unit.KGM2, "kg.m^2", "kg.m2");
     add(m, Unit.LBFT2, "lb.ft^2", "lb.ft2");
     add(m, Unit.N, "N");
@@ -135,6 +138,52 @@ public final class Quantities {
     return out.toString();
   }
 
+  /** The first unit a text names for the dimension; metres, newtons and the like otherwise. */
+  public static Unit unitOf(String text, Dimension dimension) {
+    Matcher term = TERM.matcher(text);
+    while (term.find()) {
+      for (Unit u : UNITS.getOrDefault(String.valueOf(term.group(2)), List.of())) {
+        if (u.dimension() == dimension) {
+          return u;
+        }
+      }
+    }
+    return usual(dimension).get(0);
+  }
+
+  /** Units to show as examples, the most usual first. */
+  private static List<Unit> usual(Dimension dimension) {
+    return switch (dimension) {
+      case SPEED -> List.of(Unit.MPH, Unit.MPS, Unit.KMPH);
+      case LENGTH -> List.of(Unit.M, Unit.FT, Unit.MM);
+      case MASS -> List.of(Unit.KG, Unit.LB);
+      case FORCE -> List.of(Unit.KN, Unit.LBF, Unit.KGF);
+      case PRESSURE -> List.of(Unit.MPA, Unit.PSI, Unit.KPA);
+      case ROTATION_SPEED -> List.of(Unit.RPM, Unit.RADPS);
+      case ANGLE -> List.of(Unit.DEG);
+      case POWER -> List.of(Unit.KW, Unit.HP);
+      default -> {
+        List<Unit> all = new ArrayList<>();
+        UNITS
+            .values()
+            .forEach(
+                units -> units.stream().filter(u -> u.dimension() == dimension).forEach(all::add));
+        yield all.subList(0, Math.min(2, all.size()));
+      }
+    };
+  }
+
+  /** {@code 115 mph, 51.4 m/s or 185 km/h}: a bare number taken in the most usual unit. */
+  private static String examples(String number, double size, Dimension dimension) {
+    List<Unit> units = usual(dimension);
+    List<String> all = new ArrayList<>();
+    for (Unit u : units) {
+      all.add(all.isEmpty() ? number + " " + u.symbol() : u.print(units.get(0).toSi(size)));
+    }
+    String last = all.remove(all.size() - 1);
+    return all.isEmpty() ? last : String.join(", ", all) + " or " + last;
+  }
+
   /** The SI value of a text such as {@code 5 ft 6 in}. */
   public static double read(String text, Dimension dimension) throws Unreadable {
     if (COMMA.matcher(text).find()) {
@@ -143,7 +192,9 @@ public final class Quantities {
           "\""
               + text
               + "\": a comma inside a number is not accepted, because 1,500 is one and a half to"
-              + " some readers. Write it without the comma.");
+              + " some readers. Write "
+              + text.replace(",", "")
+              + ".");
     }
     Matcher term = TERM.matcher(text);
     double sum = 0;
@@ -170,7 +221,8 @@ public final class Quantities {
       if (dimension == Dimension.ONE && !later) {
         return size;
       }
-      throw new Unreadable("E1", text + " has no unit. Write one of: " + accepted(dimension) + ".");
+      throw new Unreadable(
+          "E1", text + " has no unit. Write " + examples(number.trim(), size, dimension) + ".");
     }
     String name = unitName.replace("·", ".").replace("²", "^2").replace("³", "^3");
     if (name.toLowerCase(Locale.ROOT).startsWith("ton") && !name.equals("tonne")) {
@@ -203,17 +255,43 @@ public final class Quantities {
     throw new Unreadable(
         "E6",
         text
-            + " is a "
+            + " is "
             + words(units.get(0).dimension())
-            + "; here a "
-            + words(dimension)
-            + " is meant, in one of: "
-            + accepted(dimension)
+            + "; here "
+            + (dimension == Dimension.ROTATION_SPEED ? "the turning speed" : words(dimension))
+            + " is meant, such as "
+            + example(dimension)
             + ".");
   }
 
   private static String words(Dimension dimension) {
-    return dimension.name().toLowerCase(Locale.ROOT).replace('_', ' ');
+    return switch (dimension) {
+      case ONE -> "a plain number";
+      case SPEED -> "a wind speed";
+      case ROTATION_SPEED -> "a turning speed";
+      case LENGTH -> "a length";
+      case ANGLE -> "an angle";
+      case AREA -> "an area";
+      case ACCELERATION -> "an acceleration";
+      default -> "a " + dimension.name().toLowerCase(Locale.ROOT).replace('_', ' ');
+    };
+  }
+
+  private static String example(Dimension dimension) {
+    return switch (dimension) {
+      case ONE -> "0.5 or 10 %";
+      case ROTATION_SPEED -> "390 rpm";
+      case SPEED -> "24 mph or 10.7 m/s";
+      case LENGTH -> "12.5 m or 41 ft";
+      case MASS -> "86 kg or 190 lb";
+      case FORCE -> "9.5 kN or 350 kgf";
+      case PRESSURE -> "235 MPa or 35 ksi";
+      case ANGLE -> "4 deg";
+      case POWER -> "1.8 kW";
+      case TIME -> "12.4 s";
+      case TEMPERATURE -> "15 degC";
+      default -> "one in " + accepted(dimension);
+    };
   }
 
   private static double number(String text) {

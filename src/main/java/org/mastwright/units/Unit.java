@@ -53,6 +53,9 @@ public record Unit(String symbol, Dimension dimension, double factor, double off
   public static final Unit LBPFT = of("lb/ft", Dimension.MASS_PER_LENGTH, 0.45359237 / 0.3048);
   public static final Unit KGPM3 = of("kg/m³", Dimension.DENSITY, 1);
   public static final Unit PCF = of("pcf", Dimension.DENSITY, 0.45359237 / 0.028316846592);
+  public static final Unit KNPM3 = of("kN/m³", Dimension.WEIGHT_PER_VOLUME, 1e3);
+  public static final Unit PCF_WEIGHT =
+      of("pcf", Dimension.WEIGHT_PER_VOLUME, 4.4482216152605 / 0.028316846592);
   public static final Unit KGM2 = of("kg·m²", Dimension.MASS_INERTIA, 1);
   public static final Unit LBFT2 =
       of("lb·ft²", Dimension.MASS_INERTIA, 0.45359237 * 0.3048 * 0.3048);
@@ -149,6 +152,7 @@ public record Unit(String symbol, Dimension dimension, double factor, double off
           List.of(KG, LB),
           List.of(KGPM, LBPFT),
           List.of(KGPM3, PCF),
+          List.of(KNPM3, PCF_WEIGHT),
           List.of(KGM2, LBFT2),
           List.of(N, LBF),
           List.of(KN, KIP),

@@ -63,7 +63,8 @@ final class SampleDesigns {
             0.002,
             0.002,
             List.of(new Tower.Attachment("cable inside", 0.23, 18.5, 27, 0)),
-            List.of(guys(1, 6.1), guys(2, 11.6), guys(3, 16.15)));
+            List.of(guys(1, 6.1), guys(2, 11.6), guys(3, 16.15)),
+            List.of());
     return new Design(
         project,
         List.of(
@@ -93,9 +94,12 @@ final class SampleDesigns {
             new Tower.BaseSupport.Fixed(),
             0.3,
             List.of(tube(0, 6, 0.219, 0.008), tube(6, 12, 0.168, 0.0063)),
-            List.of(new Joint(0, Joint.Kind.BASE_PLATE, NONE, Map.of("plate", 0.03), Map.of(), 8)),
+            List.of(
+                new Joint(
+                    0, Joint.Kind.BASE_PLATE, NONE, NONE, Map.of("plate", 0.03), Map.of(), 8)),
             0.0025,
             0.003,
+            List.of(),
             List.of(),
             List.of());
     return new Design(
@@ -132,11 +136,12 @@ final class SampleDesigns {
             0,
             Joint.Kind.BASE_PLATE,
             NONE,
+            NONE,
             Map.of("plate", 0.0127, "size", 0.356),
             Map.of("grade", "A307", "shape", "square"),
             4),
-        new Joint(6.4, Joint.Kind.COUPLING, NONE, Map.of(), Map.of("thread", "tapered"), 0),
-        new Joint(17.07, Joint.Kind.SLEEVE, NONE, Map.of("overlap", 0.61), Map.of(), 2));
+        new Joint(6.4, Joint.Kind.COUPLING, NONE, NONE, Map.of(), Map.of("thread", "tapered"), 0),
+        new Joint(17.07, Joint.Kind.SLEEVE, NONE, NONE, Map.of("overlap", 0.61), Map.of(), 2));
   }
 
   private static GuySet guys(int number, double along_m) {
