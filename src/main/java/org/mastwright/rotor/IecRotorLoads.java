@@ -8,8 +8,8 @@ import org.mastwright.working.Formula.Var;
 import org.mastwright.working.Status;
 
 /**
- * Loads of the simplified model of IEC 61400-2, 7.4, cases A to H; recalled from edition 2 and kept
- * in edition 3. SI throughout; {@code n} of the standard is {@code ω} here.
+ * Loads of the simplified model of IEC 61400-2, 7.4, cases D, H and I; recalled from edition 2 and
+ * kept in edition 3. SI throughout; {@code n} of the standard is {@code ω} here.
  */
 public final class IecRotorLoads {
   /** Drag coefficient of a parked blade seen flat. */
@@ -18,7 +18,7 @@ public final class IecRotorLoads {
   /** Thrust coefficient of case D. */
   public static final double MAXIMUM_THRUST_CT = 0.5;
 
-  private static Clause clause(String number) {
+  static Clause clause(String number) {
     return new Clause("IEC 61400-2", "2013", number, Status.RECALLED);
   }
 
@@ -74,7 +74,7 @@ public final class IecRotorLoads {
           "{Ω}·{R}/{V_e50}",
           clause("7.4.9, case H"),
           List.of(new Var("Ω", Unit.RADPS), new Var("R", Unit.M), new Var("V_e50", Unit.MPS)),
-          v -> v[0] * v[1] / v[2]);
+          v -> tipSpeedRatio(v[0], v[1], v[2]));
 
   public static final Formula CASE_H_SPINNING =
       new Formula(
@@ -112,6 +112,11 @@ public final class IecRotorLoads {
 
   public static double torque_Nm(double power_W, double efficiencyRatio, double omega_radps) {
     return power_W / (efficiencyRatio * omega_radps);
+  }
+
+  /** Speed of the blade tip over that of the wind: {@code Ω R/V}. */
+  public static double tipSpeedRatio(double omega_radps, double radius_m, double wind_mps) {
+    return omega_radps * radius_m / wind_mps;
   }
 
   /** Case D: greatest thrust at 2.5 times the mean wind. */

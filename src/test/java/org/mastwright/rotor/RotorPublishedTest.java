@@ -47,20 +47,4 @@ class RotorPublishedTest {
     assertEquals(0.78571, ActuatorDisc.buhlInduction(1.5, 1), 5e-6);
     assertEquals(0.53752, ActuatorDisc.buhlInduction(1.0, 0.9), 5e-6);
   }
-
-  /** Class II, R 1.5 m, B 3, P 1 kW, 400 rpm, greatest 520 rpm, blade 0.2025 m². */
-  @Test
-  @Source(key = "IEC 61400-2:2006", locator = "7.4, values 3.1 to 3.3", status = "recalled")
-  void value3_1_simplifiedModel() {
-    double omega = 400 * Math.PI / 30;
-    double eta = IecRotorLoads.efficiency(1000);
-    assertEquals(0.605, eta, 1e-9);
-    assertEquals(39.460, IecRotorLoads.torque_Nm(1000, eta, omega), 1e-3 * 39.460);
-    assertEquals(977.5, IecRotorLoads.caseD_N(0.5, 1.225, 8.5, 1.5), 1e-3 * 977.5);
-    double gust = 1.4 * 42.5;
-    assertEquals(1976.0, IecRotorLoads.parked_N(3, 1.5, 1.225, gust, 0.2025), 1e-3 * 1976.0);
-    double ratio = 520 * Math.PI / 30 * 1.5 / gust;
-    assertEquals(1.3728, ratio, 1e-4);
-    assertEquals(844.1, IecRotorLoads.spinning_N(3, 0.2025, ratio, 1.225, gust), 1e-3 * 844.1);
-  }
 }
