@@ -28,6 +28,10 @@ public final class FaultCatalogue {
           Map.entry("E14", "Pulls at one anchor add up; eyes apart do not share."),
           Map.entry("E15", "A working load says nothing without its factor."),
           Map.entry("E16", "A many-sided tube is wider across its corners than across its flats."),
+          Map.entry(
+              "E17",
+              "An upright rotor has no hub height, overhang, tilt or upwind side; its blades begin"
+                  + " `upright.rotor-bottom-above-top` above the mast top."),
           Map.entry("E18", "A logarithmic decrement is 2 pi times the damping ratio."),
           Map.entry("E19", "A rod set in line with the guy does not go down by its length."),
           Map.entry("E20", "A lattice has members of its own that one tube would hide."));

@@ -21,8 +21,8 @@ final class GroundReader {
   private final double declination_rad;
   private final List<Ground.Anchor> anchors = new ArrayList<>();
 
-  /** Level and bearing of the guys that end at each anchor placed by the short form. */
-  private final List<String> usedBy = new ArrayList<>();
+  /** The lowest level whose guys end at each anchor; 0 for none yet. */
+  private final List<Integer> usedBy = new ArrayList<>();
 
   private final List<ForGuys> templates = new ArrayList<>();
 
@@ -84,7 +84,7 @@ final class GroundReader {
     anchors.add(
         new Ground.Anchor(
             name, bearing, level * Math.sin(bearing), level * Math.cos(bearing), eye, kind(k)));
-    usedBy.add("");
+    usedBy.add(0);
     k.close();
   }
 
@@ -305,6 +305,13 @@ final class GroundReader {
     return bars;
   }
 
+  /** A guy of a level ends at an anchor. */
+  void use(int anchor, int set) {
+    if (usedBy.get(anchor) == 0) {
+      usedBy.set(anchor, set);
+    }
+  }
+
   /** Index of a named anchor, or -1. */
   int named(String name) {
     int found = -1;
@@ -326,16 +333,16 @@ final class GroundReader {
       double apart =
           Math.sqrt(sq(a.east_m() - east) + sq(a.north_m() - north) + sq(a.up_m() - up_m));
       if (apart < SAME_ANCHOR_M) {
+        use(i, set);
         return i;
       }
       if (apart < NEAR_ANCHOR_M) {
         faults.warning(
             "E14",
             at,
-            "The guys of sets "
-                + usedBy.get(i)
-                + " and "
-                + set
+            (usedBy.get(i) > 0
+                    ? "The guys of sets " + usedBy.get(i) + " and " + set
+                    : "Anchor " + a.name() + " and the guys of set " + set)
                 + " to the "
                 + Compass.point(bearing_rad)
                 + " end "
@@ -352,7 +359,7 @@ final class GroundReader {
             .orElse(new Ground.Kind.NotDescribed());
     anchors.add(
         new Ground.Anchor("A" + (anchors.size() + 1), bearing_rad, east, north, up_m, kind));
-    usedBy.add(Integer.toString(set));
+    usedBy.add(set);
     return anchors.size() - 1;
   }
 }

@@ -104,6 +104,7 @@ final class GuyReader {
                 + String.join(", ", anchors.stream().map(Ground.Anchor::name).toList())
                 + ".");
       } else {
+        ground.use(found, number);
         Ground.Anchor a = anchors.get(found);
         guys.add(new GuySet.Guy(Math.atan2(a.east_m(), a.north_m()), found));
       }

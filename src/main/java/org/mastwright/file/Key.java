@@ -1,5 +1,8 @@
 package org.mastwright.file;
 
+import java.math.BigDecimal;
+import java.math.MathContext;
+import java.math.RoundingMode;
 import java.util.ArrayList;
 import java.util.LinkedHashSet;
 import java.util.List;
@@ -10,6 +13,7 @@ import java.util.Set;
 import java.util.function.BiConsumer;
 import org.mastwright.units.Dimension;
 import org.mastwright.units.Quantities;
+import org.mastwright.units.Unit;
 import org.snakeyaml.engine.v2.nodes.MappingNode;
 import org.snakeyaml.engine.v2.nodes.Node;
 import org.snakeyaml.engine.v2.nodes.NodeTuple;
@@ -299,6 +303,13 @@ final class Key {
   /** A value printed in the unit this one is typed in. */
   String alike(double si, Dimension dimension) {
     return Quantities.unitOf(text(), dimension).print(si);
+  }
+
+  /** The same, rounded towards nought, for a limit that must not be passed. */
+  String atMost(double si, Dimension dimension) {
+    Unit unit = Quantities.unitOf(text(), dimension);
+    BigDecimal cut = new BigDecimal(unit.fromSi(si)).round(new MathContext(3, RoundingMode.DOWN));
+    return cut.toPlainString() + " " + unit.symbol();
   }
 
   /** Does something with a key when it is there. */

@@ -131,7 +131,7 @@ final class Plausibility {
                 + " here, and the guys would be struck.",
             (set.number() == tower.guys().size() ? "The top guy" : "The guy")
                 + " may be at most "
-                + at.alike(most - zero, Dimension.LENGTH)
+                + at.atMost(most - zero, Dimension.LENGTH)
                 + ", or the rotor must stand higher.");
       }
     }
