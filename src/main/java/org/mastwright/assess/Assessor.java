@@ -118,6 +118,52 @@ public final class Assessor {
         HandChecks.of(design, cases, checks));
   }
 
+  /**
+   * Only the rotor speeds to keep off: no load case is solved, nothing else is judged.
+   *
+   * @throws org.mastwright.working.AnalysisException when there is no equilibrium in still air
+   */
+  public static Assessment speeds(
+      Design design,
+      Assessment.InputFile input,
+      List<DefaultTaken> defaults,
+      List<Finding> read,
+      Progress progress) {
+    progress.stage("setting the guys", 0, 1);
+    MastModel model = MastModel.of(design);
+    progress.stage("frequencies", 0, 1);
+    Speeds speeds = Speeds.of(design, new ModeFinder(model));
+    progress.stage("frequencies", 1, 1);
+    List<Finding> findings = new ArrayList<>(read);
+    findings.addAll(speeds.findings());
+    findings.add(
+        Finding.of(
+            "speeds-only",
+            Finding.Severity.OPEN_POINT,
+            "Only rotor speeds were looked at: not strength, wind, soil or raising.",
+            "Run `mastwright check` before anything is built."));
+    return new Assessment(
+        VERSION,
+        input,
+        design,
+        defaults,
+        findings,
+        Verdicts.of(speeds.checks(), findings),
+        speeds.checks(),
+        List.of(),
+        List.of(),
+        List.of(),
+        List.of(),
+        new Reactions(List.of(), List.of()),
+        speeds.modes(),
+        List.of(),
+        Optional.empty(),
+        Optional.of(speeds.result()),
+        SelfChecks.of(design, List.of(), speeds),
+        Outlines.of(design),
+        Optional.empty());
+  }
+
   private static CaseRunner.Solver solver(MastModel model) {
     return new CaseRunner.Solver() {
       @Override

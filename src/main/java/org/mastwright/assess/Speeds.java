@@ -94,19 +94,33 @@ record Speeds(
       most = Math.max(most, m.hubFactor());
     }
     List<ModeBand> bands = new ArrayList<>();
+    int bending = 0;
+    int twisting = 0;
     for (int i = 0; i < states.get(0).modes().size(); i++) {
-      double low = Double.POSITIVE_INFINITY;
-      double high = 0;
+      ModeFinder.TowerMode m = states.get(0).modes().get(i);
+      int rank = m.isTorsion() ? twisting++ : bending++;
+      double low = m.frequency_Hz();
+      double high = low;
       for (ModeFinder.State s : states) {
-        double f = s.modes().get(i).frequency_Hz();
+        double f = ofItsKind(s, m.isTorsion(), rank).frequency_Hz();
         low = Math.min(low, f);
         high = Math.max(high, f);
       }
-      ModeFinder.TowerMode m = states.get(0).modes().get(i);
       double share = m.isTorsion() ? m.twistFactor() / most : m.hubFactor() / most;
       bands.add(new ModeBand(i + 1, words(m), low, high, share, m.isTorsion()));
     }
     return bands;
+  }
+
+  /**
+   * The mode of a state by its rank among those that bend or those that twist: between states a
+   * twisting and a bending mode may change places, and neither may hide in the other's band. The
+   * last of its kind stands in where a state has fewer among those looked for.
+   */
+  private static ModeFinder.TowerMode ofItsKind(ModeFinder.State s, boolean torsion, int rank) {
+    List<ModeFinder.TowerMode> kind =
+        s.modes().stream().filter(m -> m.isTorsion() == torsion).toList();
+    return kind.isEmpty() ? s.modes().get(0) : kind.get(Math.min(rank, kind.size() - 1));
   }
 
   private static String words(ModeFinder.TowerMode m) {

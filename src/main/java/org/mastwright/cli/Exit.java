@@ -11,5 +11,8 @@ final class Exit {
   static final int WRONG_COMMAND = 64;
   static final int FAULT = 70;
 
+  /** What the Java machine itself ends with on an interrupt; nothing in here returns it. */
+  static final int STOPPED = 130;
+
   private Exit() {}
 }

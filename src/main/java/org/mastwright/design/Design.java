@@ -2,6 +2,7 @@ package org.mastwright.design;
 
 import java.util.List;
 import java.util.Optional;
+import org.mastwright.units.UnitSystem;
 
 /** One tower, whole: what stands in one tower file. */
 public record Design(
@@ -19,6 +20,22 @@ public record Design(
   public Design {
     documents = List.copyOf(documents);
     measured = List.copyOf(measured);
+  }
+
+  /** The same tower, printed in other units. */
+  public Design withUnits(UnitSystem units) {
+    return new Design(
+        project.withUnits(units),
+        documents,
+        surroundings,
+        basis,
+        site,
+        turbine,
+        tower,
+        ground,
+        raising,
+        measured,
+        verification);
   }
 
   /**

@@ -24,6 +24,24 @@ public record Project(
     UnitSystem units,
     double declination_rad) {
 
+  /** The same, printed in other units. */
+  public Project withUnits(UnitSystem other) {
+    return new Project(
+        title,
+        reference,
+        owner,
+        address,
+        parcel,
+        client,
+        date,
+        revision,
+        preparedBy,
+        checkedBy,
+        sheet,
+        other,
+        declination_rad);
+  }
+
   /** The paper size of every page. */
   public enum Sheet {
     A4,

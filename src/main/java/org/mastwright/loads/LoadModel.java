@@ -48,8 +48,15 @@ public record LoadModel(
     DesignWind wind = DesignWind.of(design.site().orElseThrow(), hub_m);
     RotorStates rotor = RotorStates.of(design.turbine().orElseThrow(), wind);
     IecLoads loads = new IecLoads(design, wind, rotor);
+    List<Finding> findings = findings(design);
+    boolean outside = findings.stream().anyMatch(f -> f.id().equals("iec-outside"));
     return new LoadModel(
-        combinations(loads), directions(design), derivations(loads), findings(design), wind, rotor);
+        outside ? List.of() : combinations(loads),
+        directions(design),
+        derivations(loads),
+        findings,
+        wind,
+        rotor);
   }
 
   private static Clause iec(String number) {
@@ -218,7 +225,8 @@ public record LoadModel(
               Finding.Severity.OPEN_POINT,
               "basis.loads",
               "The simplified model of IEC 61400-2 holds for propeller rotors with two or more"
-                  + " cantilevered blades and at most 200 m² swept; this rotor is outside it.",
+                  + " cantilevered blades and at most 200 m² swept; this rotor is outside it, and"
+                  + " no load case is calculated for it.",
               "Use the loads of en-1991-1-4 or asce-7-16 with measured rotor loads."));
     }
     String terrain = design.site().orElseThrow().wind().terrain();
