@@ -66,7 +66,7 @@ public final class Assessor {
         new CaseRunner(solver(model), progress).run(loads.combinations(), loads.directions_rad());
     List<Response> responses = cases.stream().map(SolvedCase::response).toList();
     progress.stage("frequencies", 0, 1);
-    Speeds speeds = Speeds.of(design, new ModeFinder(model));
+    Speeds speeds = Speeds.of(design, new ModeFinder(model), loads.running());
     Outline outline = Outlines.of(design);
     List<Check> checks = new ArrayList<>();
     checks.addAll(TubeChecks.of(design, responses));
@@ -132,7 +132,7 @@ public final class Assessor {
     progress.stage("setting the guys", 0, 1);
     MastModel model = MastModel.of(design);
     progress.stage("frequencies", 0, 1);
-    Speeds speeds = Speeds.of(design, new ModeFinder(model));
+    Speeds speeds = Speeds.of(design, new ModeFinder(model), LoadModel.of(design).running());
     progress.stage("frequencies", 1, 1);
     List<Finding> findings = new ArrayList<>(read);
     findings.addAll(speeds.findings());

@@ -7,6 +7,7 @@ import org.mastwright.design.Rotor;
 import org.mastwright.design.Tower;
 import org.mastwright.design.Turbine;
 import org.mastwright.forces.Vector3;
+import org.mastwright.loads.LoadCase;
 import org.mastwright.mast.ModeFinder;
 import org.mastwright.resonance.Excitation;
 import org.mastwright.resonance.ModeBand;
@@ -26,17 +27,32 @@ record Speeds(
     boolean complete,
     double first_Hz,
     double rayleigh_Hz) {
-  private static final int MODES = 12;
+  /** At least so many modes, and all below 2.5 times blade passing, up to a limit. */
+  private static final int FEWEST_MODES = 12;
+
+  private static final int MOST_MODES = 30;
+  private static final double REACH_FACTOR = 2.5;
 
   /** A clamped foot is never as stiff as "fixed" says: the margin is doubled. */
   private static final double UNKNOWN_FOOT_MARGIN = 0.20;
 
-  static Speeds of(Design design, ModeFinder finder) {
+  /**
+   * @param running loads of the running rotor, about whose deflected shapes the tower swings too
+   */
+  static Speeds of(Design design, ModeFinder finder, List<LoadCase> running) {
     Turbine turbine = design.turbine().orElseThrow();
     Rotor rotor = turbine.rotor();
-    List<ModeFinder.State> states = finder.states(MODES);
-    List<ModeBand> bands = bands(states);
     List<Excitation> excitations = Excitation.of(rotor, turbine.extraOrders());
+    double top_Hz = turbine.rotorSpeed().highest_radps() / (2 * Math.PI);
+    double reach_Hz =
+        Math.max(
+            REACH_FACTOR * rotor.blades() * top_Hz,
+            1.3 * top_Hz * turbine.extraOrders().stream().mapToInt(o -> o).max().orElse(0));
+    int below = finder.countBelow(reach_Hz);
+    int count = Math.max(FEWEST_MODES, Math.min(MOST_MODES, below + 2));
+    List<ModeFinder.State> states =
+        finder.states(count, running).stream().filter(s -> !s.modes().isEmpty()).toList();
+    List<ModeBand> bands = bands(states);
     boolean fixed = design.tower().base() instanceof Tower.BaseSupport.Fixed;
     double margin =
         fixed ? Math.max(turbine.marginRatio(), UNKNOWN_FOOT_MARGIN) : turbine.marginRatio();
@@ -55,6 +71,20 @@ record Speeds(
                 + " %"
                 + (fixed ? ", since the stiffness of the foot is not known." : "."),
             fixed ? "Give tower.base: {rotational-stiffness: …} for half of it." : ""));
+    if (below > MOST_MODES) {
+      findings.add(
+          Finding.of(
+              "modes-many",
+              Finding.Severity.OPEN_POINT,
+              "The tower has "
+                  + below
+                  + " natural frequencies below "
+                  + Numbers.significant(reach_Hz, 3)
+                  + " Hz; the lowest "
+                  + MOST_MODES
+                  + " were judged.",
+              "Have the higher ones looked at, or lower the highest rotor speed."));
+    }
     List<Check> checks =
         SeparationChecks.of(bands, excitations, dwelling(range), margin, upright, List.of());
     ModeFinder.TowerMode first = states.get(0).modes().get(0);

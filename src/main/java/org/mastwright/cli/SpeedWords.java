@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.List;
 import org.mastwright.assess.Assessment;
 import org.mastwright.assess.SpeedResult;
+import org.mastwright.design.Tower;
 import org.mastwright.units.Numbers;
 import org.mastwright.units.Unit;
 
@@ -135,11 +136,12 @@ final class SpeedWords {
     s.remarks()
         .forEach(
             r -> Words.wrap(out, "  ", Character.toUpperCase(r.charAt(0)) + r.substring(1) + "."));
-    String guys = a.design().tower().guys().isEmpty() ? "" : ", guys loose and taut";
+    String guys = a.design().tower().guys().isEmpty() ? "" : ", guys loose and taut, the mast leaning in the wind it runs in";
+    String foot = a.design().tower().base() instanceof Tower.BaseSupport.Sprung ? ", foot half and twice as stiff" : "";
     Words.wrap(
         out,
         "  ",
-        "Why a range and not a line: head mass +-10 %" + guys + ", and the margin of the file.");
+        "Why a range and not a line: head mass +-10 %" + guys + foot + ", and the margin of the file.");
     a.findings().stream()
         .filter(f -> f.id().equals("margin"))
         .forEach(f -> Words.wrap(out, "  ", f.message() + " " + f.remedy()));

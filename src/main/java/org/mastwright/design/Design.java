@@ -22,6 +22,22 @@ public record Design(
     measured = List.copyOf(measured);
   }
 
+  /** The same with another tower. */
+  public Design withTower(Tower other) {
+    return new Design(
+        project,
+        documents,
+        surroundings,
+        basis,
+        site,
+        turbine,
+        other,
+        ground,
+        raising,
+        measured,
+        verification);
+  }
+
   /** The same tower, printed in other units. */
   public Design withUnits(UnitSystem units) {
     return new Design(

@@ -36,6 +36,35 @@ public record GuySet(
     }
   }
 
+  /** The same level with its rope at one end of the band of its modulus. */
+  public GuySet withModulusAt(int sign) {
+    Rope r = rope;
+    Rope other =
+        new Rope(
+            r.label(),
+            r.diameter_m(),
+            r.area_m2(),
+            r.modulus_Pa() * (1 + sign * r.modulusBandFraction()),
+            0,
+            r.mass_kgpm(),
+            r.breaking_N(),
+            r.source());
+    return new GuySet(
+        number,
+        along_m,
+        arm_m,
+        other,
+        ends,
+        hardware,
+        tension,
+        tensionAtAnchor,
+        toleranceFraction,
+        settingGuy,
+        upright,
+        thermalExpansion_perK,
+        guys);
+  }
+
   /**
    * One guy.
    *

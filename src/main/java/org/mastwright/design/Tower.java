@@ -34,6 +34,21 @@ public record Tower(
     }
   }
 
+  /** The same tower with other guys. */
+  public Tower withGuys(List<GuySet> others) {
+    return new Tower(
+        kind,
+        base,
+        footLevel_m,
+        tubes,
+        joints,
+        dampingRatio,
+        outOfPlumbRatio,
+        attachments,
+        others,
+        openings);
+  }
+
   /** Length of the mast along its axis. */
   public double length_m() {
     return tubes.get(tubes.size() - 1).top_m();

@@ -84,6 +84,12 @@ public final class VibrationSolver {
     return new Modes(list(system, x, values, asked), proven(system, values, asked));
   }
 
+  /** How many natural frequencies lie below one: the count of negative pivots proves it. */
+  public static int countBelow(Equilibrium balance, double frequency_Hz, CableMass cableMass) {
+    double omega = 2 * Math.PI * frequency_Hz;
+    return new ModalSystem(balance, cableMass).factor(omega * omega);
+  }
+
   private static double[][] start(int size, int width) {
     Random random = new Random(SEED);
     double[][] x = new double[width][size];

@@ -24,10 +24,12 @@ import org.mastwright.working.Step;
  * The loads of one basis: IEC 61400-2 simplified.
  *
  * @param directions_rad the wind comes from, that are always run
+ * @param guyBearings_rad the few of them that show what the guys do to the frequencies
  */
 public record LoadModel(
     List<Combination> combinations,
     List<Double> directions_rad,
+    List<Double> guyBearings_rad,
     List<Derivation> derivations,
     List<Finding> findings,
     DesignWind wind,
@@ -37,6 +39,7 @@ public record LoadModel(
   public LoadModel {
     combinations = List.copyOf(combinations);
     directions_rad = List.copyOf(directions_rad);
+    guyBearings_rad = List.copyOf(guyBearings_rad);
     derivations = List.copyOf(derivations);
     findings = List.copyOf(findings);
   }
@@ -53,10 +56,39 @@ public record LoadModel(
     return new LoadModel(
         outside ? List.of() : combinations(loads),
         directions(design),
+        guyBearings(design),
         derivations(loads),
         findings,
         wind,
         rotor);
+  }
+
+  /**
+   * The rotor running in its greatest wind, unfactored: towards the first guy of the top level and
+   * towards the gap beside it, or from the north for a monopole. Empty outside the model.
+   */
+  public List<LoadCase> running() {
+    List<LoadCase> all = new ArrayList<>();
+    for (Combination c : combinations) {
+      for (Combination.Variant v : c.variants()) {
+        if (c.limitState() == LimitState.SERVICE && v.key().equals("run")) {
+          guyBearings_rad.forEach(b -> all.add(c.at(b, v)));
+        }
+      }
+    }
+    return all;
+  }
+
+  /** Wind along the first guy of the top level, from it and towards it, and between two guys. */
+  private static List<Double> guyBearings(Design design) {
+    List<GuySet> sets = design.tower().guys();
+    if (sets.isEmpty()) {
+      return List.of(0.0);
+    }
+    List<GuySet.Guy> guys = sets.get(sets.size() - 1).guys();
+    double along = guys.get(0).azimuth_rad();
+    double between = (guys.get(1).azimuth_rad() - along) / 2;
+    return List.of(along, along + Math.PI, along + between);
   }
 
   private static Clause iec(String number) {

@@ -8,6 +8,7 @@ import java.util.Optional;
 import java.util.OptionalDouble;
 import org.mastwright.design.Basis;
 import org.mastwright.design.Design;
+import org.mastwright.design.GuySet;
 import org.mastwright.design.Tower;
 import org.mastwright.design.Turbine;
 import org.mastwright.forces.LimitState;
@@ -48,12 +49,12 @@ public final class MastModel {
   private final Map<PretensionState, double[]> unstretched_m = new EnumMap<>(PretensionState.class);
   private final Map<PretensionState, Equilibrium> stillAir = new EnumMap<>(PretensionState.class);
 
-  private MastModel(Design design) {
+  private MastModel(Design design, List<PretensionState> states) {
     this.design = design;
     this.mesh = Mesh.usual(design.tower());
     this.guys = new GuyPlaces(design, mesh);
     Chain bare = bare(1, headCentre());
-    for (PretensionState state : PretensionState.values()) {
+    for (PretensionState state : states) {
       double[] lengths = guys.size() == 0 ? new double[0] : set(bare, guys, state);
       unstretched_m.put(state, lengths);
       stillAir.put(state, still(Pretension.with(bare, guys, lengths)));
@@ -81,7 +82,24 @@ public final class MastModel {
    * @throws AnalysisException when there is no equilibrium in still air, with the likely cause
    */
   public static MastModel of(Design design) {
-    return new MastModel(design);
+    return new MastModel(design, List.of(PretensionState.values()));
+  }
+
+  /**
+   * The same tower with ropes whose modulus lies at one end of its band, set to the nominal
+   * tension only.
+   *
+   * @param sign +1 for the stiff end of the band, -1 for the soft one
+   */
+  MastModel withRopes(int sign) {
+    Tower t = design.tower();
+    List<GuySet> sets = t.guys().stream().map(g -> g.withModulusAt(sign)).toList();
+    return new MastModel(design.withTower(t.withGuys(sets)), List.of(PretensionState.NOMINAL));
+  }
+
+  /** Whether the modulus of any rope was taken from its kind. */
+  boolean ropesAreBanded() {
+    return design.tower().guys().stream().anyMatch(g -> g.rope().modulusBandFraction() > 0);
   }
 
   private static Equilibrium still(Chain chain) {

@@ -2,13 +2,17 @@ package org.mastwright.mast;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.function.Supplier;
+import java.util.stream.IntStream;
 import org.mastwright.design.Tower;
 import org.mastwright.forces.Vector3;
 import org.mastwright.frame.Chain;
 import org.mastwright.frame.ChainLoad;
 import org.mastwright.frame.Equilibrium;
+import org.mastwright.frame.EquilibriumException;
 import org.mastwright.frame.EquilibriumSolver;
 import org.mastwright.frame.VibrationSolver;
+import org.mastwright.loads.LoadCase;
 import org.mastwright.loads.PretensionState;
 
 /** Natural frequencies of the tower in still air, as it is and as it could be. */
@@ -60,24 +64,61 @@ public final class ModeFinder {
     return all;
   }
 
+  /** How many natural frequencies in still air lie below one. */
+  public int countBelow(double frequency_Hz) {
+    return VibrationSolver.countBelow(
+        model.stillAir(PretensionState.NOMINAL),
+        frequency_Hz,
+        VibrationSolver.CableMass.THIRD_AT_NODE);
+  }
+
   /**
-   * Still air as described, then guys loose and taut, head 10 % lighter and heavier, foot half and
-   * twice as stiff where it is a spring.
+   * Still air as described, then guys loose and taut, ropes soft and stiff where their modulus was
+   * taken from their kind, head 10 % lighter and heavier, foot half and twice as stiff where it is
+   * a spring, and the tower leaning under each running load given (a guy on its slack side is a
+   * softer spring).
    */
-  public List<State> states(int count) {
-    List<State> all = new ArrayList<>();
-    all.add(state("still-air", model.stillAir(PretensionState.NOMINAL), count));
+  public List<State> states(int count, List<LoadCase> running) {
+    List<Supplier<State>> all = new ArrayList<>();
+    all.add(() -> state("still-air", model.stillAir(PretensionState.NOMINAL), count));
     if (model.guys().size() > 0) {
-      all.add(state("loose guys", model.stillAir(PretensionState.LOW), count));
-      all.add(state("taut guys", model.stillAir(PretensionState.HIGH), count));
+      all.add(() -> state("loose guys", model.stillAir(PretensionState.LOW), count));
+      all.add(() -> state("taut guys", model.stillAir(PretensionState.HIGH), count));
     }
-    all.add(varied("lighter head", 1 - HEAD_BAND, 1, count));
-    all.add(varied("heavier head", 1 + HEAD_BAND, 1, count));
+    if (model.ropesAreBanded()) {
+      for (int sign : new int[] {-1, 1}) {
+        all.add(
+            () ->
+                state(
+                    sign < 0 ? "soft ropes" : "stiff ropes",
+                    model.withRopes(sign).stillAir(PretensionState.NOMINAL),
+                    count));
+      }
+    }
+    all.add(() -> varied("lighter head", 1 - HEAD_BAND, 1, count));
+    all.add(() -> varied("heavier head", 1 + HEAD_BAND, 1, count));
     if (model.design().tower().base() instanceof Tower.BaseSupport.Sprung) {
-      all.add(varied("softer foot", 1, 0.5, count));
-      all.add(varied("stiffer foot", 1, 2, count));
+      all.add(() -> varied("softer foot", 1, 0.5, count));
+      all.add(() -> varied("stiffer foot", 1, 2, count));
     }
-    return all;
+    for (LoadCase loads : running) {
+      all.add(() -> underWind(loads, count));
+    }
+    State[] found = new State[all.size()];
+    IntStream.range(0, found.length).parallel().forEach(i -> found[i] = all.get(i).get());
+    return List.of(found);
+  }
+
+  /** About the balance under a running load; without one the tower fails elsewhere. */
+  private State underWind(LoadCase loads, int count) {
+    try {
+      Equilibrium balance =
+          EquilibriumSolver.solve(
+              model.chainFor(loads), new LoadMapping(model, loads).chainLoad());
+      return state(loads.mark().id(), balance, count);
+    } catch (EquilibriumException none) {
+      return new State(loads.mark().id(), List.of(), true);
+    }
   }
 
   private State varied(String name, double headFactor, double footFactor, int count) {
@@ -99,7 +140,10 @@ public final class ModeFinder {
     return state(name, EquilibriumSolver.solve(chain, ChainLoad.weightOnly()), count);
   }
 
-  private State state(String name, Equilibrium balance, int count) {
+  private static State state(String name, Equilibrium balance, int count) {
+    if (!balance.isStable()) {
+      return new State(name, List.of(), true);
+    }
     VibrationSolver.Modes found =
         VibrationSolver.modes(balance, count, VibrationSolver.CableMass.THIRD_AT_NODE);
     return new State(name, found.modes().stream().map(ModeFinder::mode).toList(), found.complete());
