@@ -19,6 +19,7 @@ final class SideView {
 
   private final Design design;
   private final UnitSystem units;
+
   /** What stands beside a height. */
   private record Named(double height_m, String words) {}
 

@@ -136,12 +136,21 @@ final class SpeedWords {
     s.remarks()
         .forEach(
             r -> Words.wrap(out, "  ", Character.toUpperCase(r.charAt(0)) + r.substring(1) + "."));
-    String guys = a.design().tower().guys().isEmpty() ? "" : ", guys loose and taut, the mast leaning in the wind it runs in";
-    String foot = a.design().tower().base() instanceof Tower.BaseSupport.Sprung ? ", foot half and twice as stiff" : "";
+    String guys =
+        a.design().tower().guys().isEmpty()
+            ? ""
+            : ", guys loose and taut, the mast leaning in the wind it runs in";
+    String foot =
+        a.design().tower().base() instanceof Tower.BaseSupport.Sprung
+            ? ", foot half and twice as stiff"
+            : "";
     Words.wrap(
         out,
         "  ",
-        "Why a range and not a line: head mass +-10 %" + guys + foot + ", and the margin of the file.");
+        "Why a range and not a line: head mass +-10 %"
+            + guys
+            + foot
+            + ", and the margin of the file.");
     a.findings().stream()
         .filter(f -> f.id().equals("margin"))
         .forEach(f -> Words.wrap(out, "  ", f.message() + " " + f.remedy()));

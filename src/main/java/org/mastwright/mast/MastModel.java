@@ -86,8 +86,8 @@ public final class MastModel {
   }
 
   /**
-   * The same tower with ropes whose modulus lies at one end of its band, set to the nominal
-   * tension only.
+   * The same tower with ropes whose modulus lies at one end of its band, set to the nominal tension
+   * only.
    *
    * @param sign +1 for the stiff end of the band, -1 for the soft one
    */

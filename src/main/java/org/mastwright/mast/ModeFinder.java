@@ -113,8 +113,7 @@ public final class ModeFinder {
   private State underWind(LoadCase loads, int count) {
     try {
       Equilibrium balance =
-          EquilibriumSolver.solve(
-              model.chainFor(loads), new LoadMapping(model, loads).chainLoad());
+          EquilibriumSolver.solve(model.chainFor(loads), new LoadMapping(model, loads).chainLoad());
       return state(loads.mark().id(), balance, count);
     } catch (EquilibriumException none) {
       return new State(loads.mark().id(), List.of(), true);
