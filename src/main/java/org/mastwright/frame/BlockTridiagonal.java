@@ -25,6 +25,7 @@ final class BlockTridiagonal {
   private final DMatrix6x6 side = new DMatrix6x6();
   private final double[] work = new double[36];
   private final double[] inverted = new double[36];
+  private final double[] reciprocals = new double[6];
   private final DMatrix6 a = new DMatrix6();
   private final DMatrix6 b = new DMatrix6();
   private int negativePivots;
@@ -86,7 +87,10 @@ final class BlockTridiagonal {
     }
   }
 
-  /** Inverse of {@code block} by {@code L·D·Lᵀ} without pivoting, counting negative pivots. */
+  /**
+   * Inverse of {@code block} by {@code L·D·Lᵀ} without pivoting, counting negative pivots: {@code
+   * L⁻ᵀ·D⁻¹·L⁻¹}, of which one half is worked out.
+   */
   private void invert(int node) {
     read(block, work);
     double greatest = 0;
@@ -98,44 +102,46 @@ final class BlockTridiagonal {
       double pivot = work[7 * j];
       if (!(Math.abs(pivot) >= guard)) {
         pivot = pivot < 0 ? -guard : guard;
-        work[7 * j] = pivot;
       }
-      if (pivot < 0) {
-        if (negativePivots++ == 0) {
-          firstNegative = node;
-        }
+      if (pivot < 0 && negativePivots++ == 0) {
+        firstNegative = node;
       }
+      double reciprocal = 1 / pivot;
+      reciprocals[j] = reciprocal;
       for (int i = j + 1; i < 6; i++) {
-        double factor = work[6 * i + j] / pivot;
+        double factor = work[6 * i + j] * reciprocal;
         for (int k = j + 1; k <= i; k++) {
           work[6 * i + k] -= factor * work[6 * k + j];
         }
       }
       for (int i = j + 1; i < 6; i++) {
-        work[6 * i + j] /= pivot;
+        work[6 * i + j] *= reciprocal;
       }
     }
-    for (int column = 0; column < 6; column++) {
-      solveUnit(column);
+    invertUnitTriangle();
+    for (int r = 0; r < 6; r++) {
+      for (int c = 0; c <= r; c++) {
+        double sum = c == r ? reciprocals[r] : work[6 * r + c] * reciprocals[r];
+        for (int k = r + 1; k < 6; k++) {
+          sum += work[6 * k + r] * reciprocals[k] * work[6 * k + c];
+        }
+        inverted[6 * r + c] = sum;
+        inverted[6 * c + r] = sum;
+      }
     }
     inverse[node].setTo(0, inverted);
   }
 
-  /** One column of the inverse into {@code inverted}. */
-  private void solveUnit(int column) {
-    for (int i = 0; i < 6; i++) {
-      double x = i == column ? 1 : 0;
-      for (int k = column; k < i; k++) {
-        x -= work[6 * i + k] * inverted[6 * k + column];
+  /** The unit lower triangle in {@code work} becomes its inverse. */
+  private void invertUnitTriangle() {
+    for (int c = 0; c < 5; c++) {
+      for (int r = c + 1; r < 6; r++) {
+        double sum = -work[6 * r + c];
+        for (int k = c + 1; k < r; k++) {
+          sum -= work[6 * r + k] * work[6 * k + c];
+        }
+        work[6 * r + c] = sum;
       }
-      inverted[6 * i + column] = i < column ? 0 : x;
-    }
-    for (int i = 5; i >= 0; i--) {
-      double x = inverted[6 * i + column] / work[7 * i];
-      for (int k = i + 1; k < 6; k++) {
-        x -= work[6 * k + i] * inverted[6 * k + column];
-      }
-      inverted[6 * i + column] = x;
     }
   }
 

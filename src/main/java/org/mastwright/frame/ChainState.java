@@ -37,15 +37,42 @@ final class ChainState {
     return out;
   }
 
-  /** Moves by a share of a step: six numbers a node, movement and spin. */
+  /**
+   * Moves by a share of a step: six numbers a node, movement and spin.
+   *
+   * <p>From the foot up each chord takes the direction the step gives it and the length the step
+   * means: the old one and the movement along it. Movement across a chord would else stretch it in
+   * the second order, and a stiff mast answers that with forces a hundred times those it bears.
+   */
   void move(double[] step, double share) {
-    for (int i = 0; i < place_m.length; i++) {
-      double[] spin = new double[3];
-      for (int k = 0; k < 3; k++) {
-        place_m[i][k] += share * step[6 * i + k];
-        spin[k] = share * step[6 * i + 3 + k];
-      }
-      rotation[i] = Algebra.product(Algebra.rotation(spin), rotation[i]);
+    double[] before = place_m[0].clone();
+    for (int k = 0; k < 3; k++) {
+      place_m[0][k] += share * step[k];
     }
+    spin(0, step, share);
+    for (int i = 1; i < place_m.length; i++) {
+      double[] chord = Algebra.minus(place_m[i], before);
+      before = place_m[i].clone();
+      double[] change = new double[3];
+      for (int k = 0; k < 3; k++) {
+        change[k] = share * (step[6 * i + k] - step[6 * (i - 1) + k]);
+      }
+      double length = Algebra.norm(chord);
+      double meant = length + Algebra.dot(chord, change) / length;
+      double[] turned = Algebra.plus(chord, change);
+      double scale = meant / Algebra.norm(turned);
+      for (int k = 0; k < 3; k++) {
+        place_m[i][k] = place_m[i - 1][k] + scale * turned[k];
+      }
+      spin(i, step, share);
+    }
+  }
+
+  private void spin(int i, double[] step, double share) {
+    double[] spin = new double[3];
+    for (int k = 0; k < 3; k++) {
+      spin[k] = share * step[6 * i + 3 + k];
+    }
+    rotation[i] = Algebra.product(Algebra.rotation(spin), rotation[i]);
   }
 }

@@ -104,9 +104,9 @@ final class CorotatedBeam {
     double[] m1 = conjugate(a, local.lower_Nm);
     double[] m2 = conjugate(b, local.upper_Nm);
     double[] spin = frameSpin(applyTransposed(frame, q), q1, q2, now_m);
-    collect(local, m1, m2, spin, e1);
+    collect(local, m1, m2, spin);
     if (withTangent) {
-      differentiate(local, a, b, m1, m2, spin, e1, now_m, applyTransposed(frame, q));
+      differentiate(local, a, b, m1, m2, spin, now_m, applyTransposed(frame, q));
     }
   }
 
@@ -211,16 +211,8 @@ final class CorotatedBeam {
   }
 
   /** End forces in the turned frame: moments less what they do through the frame's own spin. */
-  private void collect(Local local, double[] m1, double[] m2, double[] g, double[] e1) {
-    double[] sum = plus(m1, m2);
-    double[] own = new double[12];
-    for (int j = 0; j < 12; j++) {
-      own[j] = -(g[j] * sum[0] + g[12 + j] * sum[1] + g[24 + j] * sum[2]);
-    }
-    for (int k = 0; k < 3; k++) {
-      own[3 + k] += m1[k];
-      own[9 + k] += m2[k];
-    }
+  private void collect(Local local, double[] m1, double[] m2, double[] g) {
+    double[] own = ownSpins(m1, m2, g);
     own[0] -= local.axial_N;
     own[6] += local.axial_N;
     turnVector(own, force);
@@ -246,100 +238,130 @@ final class CorotatedBeam {
       double[] m1,
       double[] m2,
       double[] g,
-      double[] e1,
       double now_m,
       double[] q) {
-    double[] p = projector(g);
-    double[] map = new double[84]; // 7×12: the local quantities by movements and spins
-    map[0] = -1;
-    map[6] = 1;
-    fillMap(map, spinToVector(a), p, 1, 0);
-    fillMap(map, spinToVector(b), p, 4, 36);
     double[] own = new double[144];
-    addCongruence(own, local.stiffness, map);
-    addMomentTurning(own, p, conjugateByVector(a, local.lower_Nm), spinToVector(a), 0);
-    addMomentTurning(own, p, conjugateByVector(b, local.upper_Nm), spinToVector(b), 36);
-    addFrameTurning(own, local, m1, m2, p, g, now_m, q);
+    addStretching(own, local, a, b, g);
+    addSpinning(own, spinStiffness(local, a, b), g);
+    addFrameTurning(own, local, m1, m2, g, now_m, q);
     turnMatrix(own);
   }
 
-  /** 6×12: spins of both ends against the frame. */
-  private static double[] projector(double[] g) {
-    double[] p = new double[72];
-    for (int i = 0; i < 3; i++) {
-      for (int j = 0; j < 12; j++) {
-        p[12 * i + j] = -g[12 * i + j];
-        p[12 * (i + 3) + j] = -g[12 * i + j];
-      }
-      p[12 * i + 3 + i] += 1;
-      p[12 * (i + 3) + 9 + i] += 1;
-    }
-    return p;
-  }
-
-  private static void fillMap(double[] map, double[] t, double[] p, int row, int from) {
-    for (int i = 0; i < 3; i++) {
-      for (int j = 0; j < 12; j++) {
-        map[12 * (row + i) + j] =
-            t[3 * i] * p[from + j]
-                + t[3 * i + 1] * p[from + 12 + j]
-                + t[3 * i + 2] * p[from + 24 + j];
-      }
-    }
-  }
-
-  private static void addCongruence(double[] own, double[] k, double[] map) {
-    double[] km = new double[84];
-    for (int i = 0; i < 7; i++) {
-      for (int l = 0; l < 7; l++) {
-        double v = k[7 * i + l];
-        if (v != 0) {
-          for (int j = 0; j < 12; j++) {
-            km[12 * i + j] += v * map[12 * l + j];
-          }
+  /**
+   * Moments by spins of both ends against the frame, 6×6: what the rotation vectors do, and what
+   * the moments gain as the vectors they work on change.
+   */
+  private static double[] spinStiffness(Local local, double[] a, double[] b) {
+    double[][] t = {spinToVector(a), spinToVector(b)};
+    double[] half = new double[36];
+    for (int r = 0; r < 6; r++) {
+      for (int end = 0; end < 2; end++) {
+        int from = 7 * (r + 1) + 1 + 3 * end;
+        for (int c = 0; c < 3; c++) {
+          half[6 * r + 3 * end + c] =
+              local.stiffness[from] * t[end][c]
+                  + local.stiffness[from + 1] * t[end][3 + c]
+                  + local.stiffness[from + 2] * t[end][6 + c];
         }
       }
     }
-    for (int l = 0; l < 7; l++) {
-      for (int i = 0; i < 12; i++) {
-        double v = map[12 * l + i];
-        if (v != 0) {
-          for (int j = 0; j < 12; j++) {
-            own[12 * i + j] += v * km[12 * l + j];
-          }
+    double[] whole = new double[36];
+    for (int end = 0; end < 2; end++) {
+      for (int r = 0; r < 3; r++) {
+        for (int c = 0; c < 6; c++) {
+          whole[6 * (3 * end + r) + c] =
+              t[end][r] * half[18 * end + c]
+                  + t[end][3 + r] * half[18 * end + 6 + c]
+                  + t[end][6 + r] * half[18 * end + 12 + c];
         }
       }
     }
+    addBlock(whole, 0, product(conjugateByVector(a, local.lower_Nm), t[0]));
+    addBlock(whole, 21, product(conjugateByVector(b, local.upper_Nm), t[1]));
+    return whole;
   }
 
-  private static void addMomentTurning(
-      double[] own, double[] p, double[] byVector, double[] t, int from) {
-    double[] k = product(byVector, t);
+  private static void addBlock(double[] six, int at, double[] three) {
     for (int r = 0; r < 3; r++) {
       for (int c = 0; c < 3; c++) {
-        double v = k[3 * r + c];
-        for (int i = 0; i < 12; i++) {
-          double left = v * p[from + 12 * r + i];
-          if (left != 0) {
-            for (int j = 0; j < 12; j++) {
-              own[12 * i + j] += left * p[from + 12 * c + j];
-            }
+        six[at + 6 * r + c] += three[3 * r + c];
+      }
+    }
+  }
+
+  /**
+   * {@code PᵀSP} where the ends spin against the frame by {@code P = E − J·g}: their own spins less
+   * the frame's.
+   */
+  private static void addSpinning(double[] own, double[] s, double[] g) {
+    double[] sp = new double[72];
+    for (int r = 0; r < 6; r++) {
+      for (int k = 0; k < 3; k++) {
+        double both = s[6 * r + k] + s[6 * r + 3 + k];
+        for (int j = 0; j < 12; j++) {
+          sp[12 * r + j] -= both * g[12 * k + j];
+        }
+      }
+      for (int k = 0; k < 3; k++) {
+        sp[12 * r + 3 + k] += s[6 * r + k];
+        sp[12 * r + 9 + k] += s[6 * r + 3 + k];
+      }
+    }
+    for (int k = 0; k < 3; k++) {
+      for (int i = 0; i < 12; i++) {
+        double v = g[12 * k + i];
+        if (v != 0) {
+          for (int j = 0; j < 12; j++) {
+            own[12 * i + j] -= v * (sp[12 * k + j] + sp[12 * (k + 3) + j]);
           }
         }
       }
+      for (int j = 0; j < 12; j++) {
+        own[12 * (3 + k) + j] += sp[12 * k + j];
+        own[12 * (9 + k) + j] += sp[12 * (k + 3) + j];
+      }
     }
+  }
+
+  /** The stretch with itself and with the spins it couples to. */
+  private static void addStretching(double[] own, Local local, double[] a, double[] b, double[] g) {
+    double k0 = local.stiffness[0];
+    double[] pull = new double[] {local.stiffness[1], local.stiffness[2], local.stiffness[3]};
+    double[] lower = applyTransposed(spinToVector(a), pull);
+    pull = new double[] {local.stiffness[4], local.stiffness[5], local.stiffness[6]};
+    double[] upper = applyTransposed(spinToVector(b), pull);
+    double[] row = ownSpins(lower, upper, g);
+    for (int j = 0; j < 12; j++) {
+      own[j] -= row[j];
+      own[72 + j] += row[j];
+      own[12 * j] -= row[j];
+      own[12 * j + 6] += row[j];
+    }
+    own[0] += k0;
+    own[6] -= k0;
+    own[72] -= k0;
+    own[78] += k0;
+  }
+
+  /** {@code Pᵀ·(lower, upper)}: what a pair of moments on the spins does to the nodes. */
+  private static double[] ownSpins(double[] lower, double[] upper, double[] g) {
+    double[] out = new double[12];
+    for (int j = 0; j < 12; j++) {
+      out[j] =
+          -(g[j] * (lower[0] + upper[0])
+              + g[12 + j] * (lower[1] + upper[1])
+              + g[24 + j] * (lower[2] + upper[2]));
+    }
+    for (int k = 0; k < 3; k++) {
+      out[3 + k] += lower[k];
+      out[9 + k] += upper[k];
+    }
+    return out;
   }
 
   /** What the end forces gain because the frame itself turns with the nodes. */
   private void addFrameTurning(
-      double[] own,
-      Local local,
-      double[] m1,
-      double[] m2,
-      double[] p,
-      double[] g,
-      double now_m,
-      double[] q) {
+      double[] own, Local local, double[] m1, double[] m2, double[] g, double now_m, double[] q) {
     double d = local.axial_N / now_m;
     for (int k = 1; k < 3; k++) {
       own[12 * k + k] += d;
@@ -347,12 +369,7 @@ final class CorotatedBeam {
       own[12 * k + 6 + k] -= d;
       own[12 * (6 + k) + k] -= d;
     }
-    double[] pm = new double[12];
-    for (int j = 0; j < 12; j++) {
-      for (int k = 0; k < 3; k++) {
-        pm[j] += p[12 * k + j] * m1[k] + p[12 * (k + 3) + j] * m2[k];
-      }
-    }
+    double[] pm = ownSpins(m1, m2, g);
     for (int part = 0; part < 4; part++) {
       double[] s = skew(new double[] {pm[3 * part], pm[3 * part + 1], pm[3 * part + 2]});
       for (int i = 0; i < 3; i++) {

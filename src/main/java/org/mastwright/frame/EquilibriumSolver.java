@@ -20,10 +20,13 @@ public final class EquilibriumSolver {
    * @param toleranceRatio unbalanced force over the greatest force
    * @param mostIterations of one load step
    * @param leastStepFraction of the variable loads before it is given up
+   * @param patienceIterations after so many, a tangent that is not positive ends the attempt: a
+   *     smaller step is cheaper than a search beyond the limit point
    */
-  public record Options(double toleranceRatio, int mostIterations, double leastStepFraction) {
+  public record Options(
+      double toleranceRatio, int mostIterations, double leastStepFraction, int patienceIterations) {
     /** 1e-10, 40 iterations, a sixty-fourth of the load. */
-    public static final Options USUAL = new Options(1e-10, 40, 1.0 / 64);
+    public static final Options USUAL = new Options(1e-10, 40, 1.0 / 64, 40);
   }
 
   /** The balance under all loads, from rest. */
@@ -43,16 +46,24 @@ public final class EquilibriumSolver {
     ChainState state = start.map(s -> s.state().copy()).orElseGet(() -> ChainState.atRest(chain));
     if (start.isPresent()) {
       Attempt direct = attempt(assembler, state, factor, options);
-      if (direct.found && direct.negativePivots == 0) {
+      if (direct.stands()) {
         return direct.result(assembler, factor);
       }
       state = ChainState.atRest(chain);
     }
     Attempt still = attempt(assembler, state, 0, options);
-    if (!still.found || still.negativePivots > 0) {
+    if (!still.stands()) {
       throw failure(assembler, still, 0);
     }
     return climb(assembler, still, 0, factor, options);
+  }
+
+  /** One go at all loads from a balance near by; empty when it does not settle. */
+  public static Optional<Equilibrium> near(
+      Chain chain, ChainLoad load, Equilibrium start, Options options) {
+    Assembler assembler = new Assembler(chain, load);
+    Attempt direct = attempt(assembler, start.state().copy(), 1, options);
+    return direct.stands() ? Optional.of(direct.result(assembler, 1)) : Optional.empty();
   }
 
   /** From a balance at one factor to another, in steps. */
@@ -67,7 +78,7 @@ public final class EquilibriumSolver {
       double next = Math.min(toFactor, reached + step);
       Attempt trial = attempt(assembler, last.state.copy(), next, options);
       iterations += trial.iterations;
-      if (trial.found && trial.negativePivots == 0) {
+      if (trial.stands()) {
         last = trial;
         reached = next;
       } else {
@@ -98,6 +109,11 @@ public final class EquilibriumSolver {
       this.node = node;
     }
 
+    /** Whether a stable balance was found. */
+    boolean stands() {
+      return found && negativePivots == 0;
+    }
+
     Equilibrium result(Assembler assembler, double factor) {
       return new Equilibrium(assembler, state, factor, iterations, negativePivots);
     }
@@ -122,6 +138,10 @@ public final class EquilibriumSolver {
       if (residual <= options.toleranceRatio() * a.greatest_N || stalled) {
         int node = Math.max(a.tangent.firstNegative(), 0);
         return new Attempt(state, true, i, a.tangent.negativePivots(), node);
+      }
+      if (i > options.patienceIterations() && a.tangent.negativePivots() > 0) {
+        return new Attempt(
+            state, false, i, a.tangent.negativePivots(), Math.max(a.tangent.firstNegative(), 0));
       }
       before = residual;
       System.arraycopy(a.unbalanced, 0, step, 0, step.length);

@@ -2,13 +2,15 @@ package org.mastwright.frame;
 
 import java.util.ArrayList;
 import java.util.Arrays;
+import java.util.Comparator;
 import java.util.List;
 import java.util.Random;
-import org.apache.commons.math3.linear.Array2DRowRealMatrix;
-import org.apache.commons.math3.linear.CholeskyDecomposition;
-import org.apache.commons.math3.linear.EigenDecomposition;
-import org.apache.commons.math3.linear.LUDecomposition;
-import org.apache.commons.math3.linear.RealMatrix;
+import org.ejml.data.DMatrixRMaj;
+import org.ejml.dense.row.CommonOps_DDRM;
+import org.ejml.dense.row.decomposition.TriangularSolver_DDRM;
+import org.ejml.dense.row.factory.DecompositionFactory_DDRM;
+import org.ejml.interfaces.decomposition.CholeskyDecomposition_F64;
+import org.ejml.interfaces.decomposition.EigenDecomposition_F64;
 
 /**
  * Small vibrations about a balance by subspace iteration, with the count of negative pivots of
@@ -135,21 +137,31 @@ public final class VibrationSolver {
         m[i][j] *= scale[i] * scale[j];
       }
     }
-    RealMatrix l = new CholeskyDecomposition(new Array2DRowRealMatrix(k, false), 1e-8, 0).getL();
-    RealMatrix back = new LUDecomposition(l).getSolver().getInverse();
-    RealMatrix reduced =
-        back.multiply(new Array2DRowRealMatrix(m, false)).multiply(back.transpose());
-    EigenDecomposition eigen = new EigenDecomposition(symmetric(reduced));
-    RealMatrix vectors = back.transpose().multiply(eigen.getV());
-    double[] values = new double[p];
+    DMatrixRMaj back = inverseOfFactor(new DMatrixRMaj(k));
+    DMatrixRMaj half = new DMatrixRMaj(p, p);
+    DMatrixRMaj reduced = new DMatrixRMaj(p, p);
+    CommonOps_DDRM.mult(back, new DMatrixRMaj(m), half);
+    CommonOps_DDRM.multTransB(half, back, reduced);
+    EigenDecomposition_F64<DMatrixRMaj> eigen = DecompositionFactory_DDRM.eig(p, true, true);
+    if (!eigen.decompose(reduced)) {
+      throw new IllegalStateException("eigenvalues of the subspace were not found");
+    }
+    // eigenvalues are 1/ω²: the greatest is the lowest frequency
+    List<Integer> order = new ArrayList<>();
     for (int i = 0; i < p; i++) {
-      // eigenvalues come falling, 1/ω²: the lowest frequency first
-      double inverse = eigen.getRealEigenvalue(i);
+      order.add(i);
+    }
+    order.sort(Comparator.comparingDouble(i -> -eigen.getEigenvalue(i).real));
+    double[] values = new double[p];
+    DMatrixRMaj vector = new DMatrixRMaj(p, 1);
+    for (int i = 0; i < p; i++) {
+      double inverse = eigen.getEigenvalue(order.get(i)).real;
       values[i] = inverse > 0 ? 1 / inverse : Double.POSITIVE_INFINITY;
+      CommonOps_DDRM.multTransA(back, eigen.getEigenVector(order.get(i)), vector);
       Arrays.fill(x[i], 0);
       double size = inverse > 0 ? 1 / Math.sqrt(inverse) : 1;
       for (int j = 0; j < p; j++) {
-        double share = vectors.getEntry(j, i) * scale[j] * size;
+        double share = vector.get(j) * scale[j] * size;
         for (int n = 0; n < x[i].length; n++) {
           x[i][n] += share * next[j][n];
         }
@@ -158,8 +170,16 @@ public final class VibrationSolver {
     return values;
   }
 
-  private static RealMatrix symmetric(RealMatrix a) {
-    return a.add(a.transpose()).scalarMultiply(0.5);
+  /** Inverse of the lower Cholesky factor of a symmetric matrix. */
+  private static DMatrixRMaj inverseOfFactor(DMatrixRMaj k) {
+    CholeskyDecomposition_F64<DMatrixRMaj> cholesky =
+        DecompositionFactory_DDRM.chol(k.numRows, true);
+    if (!cholesky.decompose(k)) {
+      throw new IllegalStateException("the subspace lost its independence");
+    }
+    DMatrixRMaj l = cholesky.getT(null);
+    TriangularSolver_DDRM.invertLower(l.data, l.numRows);
+    return l;
   }
 
   private static double dot(double[] a, double[] b) {

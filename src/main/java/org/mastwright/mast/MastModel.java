@@ -41,7 +41,7 @@ public final class MastModel {
 
   /** One go at the whole load; what does not settle then goes to the limit-point search. */
   private static final EquilibriumSolver.Options ONE_GO =
-      new EquilibriumSolver.Options(1e-10, 15, 0.6);
+      new EquilibriumSolver.Options(1e-10, 15, 1, 3);
 
   private final Design design;
   private final Mesh mesh;
@@ -231,39 +231,45 @@ public final class MastModel {
   public Response solve(LoadCase loads) {
     Chain chain = chainFor(loads);
     ChainLoad load = new LoadMapping(this, loads).chainLoad();
-    try {
-      Equilibrium e =
-          EquilibriumSolver.solve(
-              chain, load, 1, Optional.of(stillAir.get(loads.pretension())), ONE_GO);
-      return recovery(loads).response(e, true, 1, Optional.empty());
-    } catch (EquilibriumException lost) {
-      return search(loads, 1, COARSE_TOLERANCE);
+    Optional<Equilibrium> direct =
+        EquilibriumSolver.near(chain, load, stillAir.get(loads.pretension()), ONE_GO);
+    if (direct.isPresent()) {
+      return recovery(loads).response(direct.get(), true, 1, Optional.empty());
     }
+    LimitPointSearch.Result found = search(loads, chain, load, 1, 0.5, COARSE_TOLERANCE);
+    return found.whole().isPresent()
+        ? recovery(loads).response(found.whole().get(), true, 1, Optional.empty())
+        : lost(loads, found);
   }
 
   /** The same with the factor on the variable loads at which the equilibrium is lost. */
   public Response solveWithLimit(LoadCase loads, double capFactor) {
-    return search(loads, capFactor, LIMIT_TOLERANCE);
-  }
-
-  private Response search(LoadCase loads, double capFactor, double tolerance) {
     Chain chain = chainFor(loads);
     ChainLoad load = new LoadMapping(this, loads).chainLoad();
+    LimitPointSearch.Result found = search(loads, chain, load, capFactor, 1, LIMIT_TOLERANCE);
+    return found.whole().isPresent()
+        ? recovery(loads).response(found.whole().get(), true, 1, Optional.of(limit(found)))
+        : lost(loads, found);
+  }
+
+  private Response lost(LoadCase loads, LimitPointSearch.Result found) {
+    return recovery(loads).response(found.last(), false, found.factor(), Optional.of(limit(found)));
+  }
+
+  private static Response.LimitPoint limit(LimitPointSearch.Result found) {
+    return new Response.LimitPoint(found.factor(), found.lost());
+  }
+
+  private LimitPointSearch.Result search(
+      LoadCase loads,
+      Chain chain,
+      ChainLoad load,
+      double capFactor,
+      double firstStep,
+      double tolerance) {
     try {
-      LimitPointSearch.Result found = LimitPointSearch.search(chain, load, capFactor, tolerance);
-      Optional<Response.LimitPoint> limit =
-          Optional.of(new Response.LimitPoint(found.factor(), found.lost()));
-      if (found.factor() < 1) {
-        return recovery(loads).response(found.last(), false, found.factor(), limit);
-      }
-      Equilibrium whole =
-          EquilibriumSolver.solve(
-              chain,
-              load,
-              1,
-              Optional.of(stillAir.get(loads.pretension())),
-              EquilibriumSolver.Options.USUAL);
-      return recovery(loads).response(whole, true, 1, limit);
+      return LimitPointSearch.search(
+          chain, load, stillAir.get(loads.pretension()), capFactor, firstStep, tolerance);
     } catch (EquilibriumException lost) {
       throw new AnalysisException(
           loads.mark().id()
