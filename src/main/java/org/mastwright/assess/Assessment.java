@@ -62,15 +62,16 @@ public record Assessment(
   /** The file and the mark of its bytes. */
   public record InputFile(String name, String sha256) {}
 
-  /** The check with the greatest utilisation; a failed one without a utilisation comes first. */
+  /**
+   * The check that decides: among those that fail, or else among those that pass, the one with the
+   * greatest utilisation. One without a number decides only where no other fails.
+   */
   public Optional<Check> governing() {
     return checks.stream()
         .filter(c -> c.outcome() != Outcome.NOT_ASSESSED)
-        .max(Comparator.comparingDouble(Assessment::rank));
-  }
-
-  private static double rank(Check check) {
-    return check.utilisation().orElse(Double.POSITIVE_INFINITY);
+        .max(
+            Comparator.comparing((Check c) -> c.outcome() == Outcome.FAIL)
+                .thenComparingDouble(c -> c.utilisation().orElse(0)));
   }
 
   /** Findings of one severity. */

@@ -80,6 +80,7 @@ public final class Assessor {
             responses,
             outline.highestBlade_m().orElse(outline.mastTop_m()),
             outline.lowestBlade_m().orElse(0)));
+    checks = new ArrayList<>(Unproved.of(checks, responses));
     checks.sort(Comparator.comparing(c -> c.subject().question()));
     SelfCheck self = SelfChecks.of(design, cases, speeds);
     List<Finding> findings = new ArrayList<>(read);

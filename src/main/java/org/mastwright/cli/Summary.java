@@ -165,6 +165,10 @@ final class Summary {
       out.add(row(q.question(), place.substring(0, breakAt(place)), used(c), word));
       Words.wrap(out, " ".repeat(30), place.substring(breakAt(place)).strip());
     }
+    if (c.outcome() == Outcome.NOT_ASSESSED) {
+      assessed(q)
+          .ifPresent(b -> out.add(" ".repeat(30) + "what was: at most " + used(b) + ", passes"));
+    }
   }
 
   /** Where a long place is broken, before the table's column ends. */
@@ -179,13 +183,20 @@ final class Summary {
 
   private static double rank(Check c) {
     double base = c.outcome() == Outcome.FAIL ? 1e6 : c.outcome() == Outcome.NOT_ASSESSED ? 1e3 : 0;
-    return base + Math.min(999, c.utilisation().orElse(999));
+    return base + Math.min(999, c.utilisation().orElse(0));
   }
 
   private Optional<Check> worst(Question q) {
     return a.checks().stream()
         .filter(c -> c.subject().question() == q)
         .max(Comparator.comparingDouble(Summary::rank));
+  }
+
+  /** The worst of those that were assessed, where others were not. */
+  private Optional<Check> assessed(Question q) {
+    return a.checks().stream()
+        .filter(c -> c.subject().question() == q && c.outcome() == Outcome.PASS)
+        .max(Comparator.comparingDouble(c -> c.utilisation().orElse(0)));
   }
 
   private static String row(String question, String place, String used, String answer) {

@@ -106,7 +106,7 @@ final class GuyReader {
       } else {
         ground.use(found, number);
         Ground.Anchor a = anchors.get(found);
-        guys.add(new GuySet.Guy(Math.atan2(a.east_m(), a.north_m()), found));
+        guys.add(new GuySet.Guy(clockwise(Math.atan2(a.east_m(), a.north_m())), found));
       }
     }
     return guys;
@@ -119,7 +119,8 @@ final class GuyReader {
       return guys;
     }
     List<Key> all = azimuths.get().items();
-    List<Double> bearings = all.stream().map(b -> b.bearing() + declination_rad).toList();
+    List<Double> bearings =
+        all.stream().map(b -> clockwise(b.bearing() + declination_rad)).toList();
     if (!k.has("radius")) {
       k.error("missing", "How far out are the anchors?", "Add `radius:`.");
     }
@@ -132,6 +133,13 @@ final class GuyReader {
               bearings.get(i), ground.place(unit, number, bearings.get(i), radius[i], level[i])));
     }
     return guys;
+  }
+
+  /** A bearing from 0 to less than a whole turn. */
+  private static double clockwise(double bearing_rad) {
+    double turn = 2 * Math.PI;
+    double b = bearing_rad % turn;
+    return b < -1e-12 ? b + turn : Math.max(0, b);
   }
 
   /** One value for all guys, or one each. */

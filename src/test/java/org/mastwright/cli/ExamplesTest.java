@@ -11,6 +11,9 @@ import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.List;
+import org.apache.pdfbox.Loader;
+import org.apache.pdfbox.pdmodel.PDDocument;
+import org.apache.pdfbox.text.PDFTextStripper;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 import org.junit.jupiter.params.ParameterizedTest;
@@ -63,7 +66,29 @@ class ExamplesTest {
       assertEquals(0, run("explain", ids.group(1)), ids.group(1));
     }
     assertTrue(found >= 10, "checks " + found);
+    reportHoldsEveryCheckAndTheCautions(results);
     assertTrue(Files.readString(Path.of("README.md")).contains("| `" + name + ".yaml` | " + code));
+  }
+
+  private void reportHoldsEveryCheckAndTheCautions(String results) throws IOException {
+    try (PDDocument pdf = Loader.loadPDF(folder.resolve("a/report.pdf").toFile())) {
+      assertTrue(pdf.getNumberOfPages() >= 12, "pages " + pdf.getNumberOfPages());
+      PDFTextStripper reader = new PDFTextStripper();
+      // soft hyphens let long words break; they are no letters
+      String all = reader.getText(pdf).replaceAll("[\u00ad\\s-]", "");
+      java.util.regex.Matcher ids =
+          java.util.regex.Pattern.compile(
+                  "\"id\" : \"([a-z0-9-]+)\",\\s+\"title\" : \"[^\"]*\",\\s+\"clause\"")
+              .matcher(results);
+      while (ids.find()) {
+        assertTrue(all.contains(ids.group(1).replace("-", "")), ids.group(1));
+      }
+      reader.setEndPage(1);
+      String first = reader.getText(pdf).replaceAll("\\s+", " ");
+      assertTrue(first.contains("A calculation, not an approval"), first);
+      assertTrue(first.contains("licensed engineer"), first);
+      assertFalse(first.toLowerCase(java.util.Locale.ROOT).contains(" safe"), first);
+    }
   }
 
   @Test
